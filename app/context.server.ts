@@ -1,0 +1,8 @@
+import { createContext } from "react-router";
+import type { Actor } from "./audit/actor.ts";
+
+/** What the middlewares put on a request for the loaders and actions behind them. */
+export const nonceContext = createContext<string>("");
+export const requestIdContext = createContext<string>("");
+/** null: nobody is signed in. */
+export const actorContext = createContext<Actor | null>(null);

@@ -1,0 +1,188 @@
+import { randomBytes } from "node:crypto";
+import { data, type MiddlewareFunction } from "react-router";
+import { nonceContext, requestIdContext } from "./context.server.ts";
+import { env } from "./env.server.ts";
+import { AppError, answerFor, type ErrorKind, type FieldErrors, Invalid, TooMany } from "./errors.ts";
+
+/** What a refused form gets back: messages by field, and what was typed, so that nothing is lost. */
+export interface FormProblem {
+  problem: { kind: ErrorKind; message: string; errors: FieldErrors; values: Record<string, string> };
+}
+
+/** What an error page is given instead of the error itself. */
+export interface PageProblem {
+  kind: ErrorKind;
+  title: string;
+  detail: string;
+  next: string;
+}
+
+const SAFE_METHODS = new Set(["GET", "HEAD", "OPTIONS"]);
+const forms = new WeakMap<Request, FormData>();
+
+/** Reads a form once; what it held can still be shown again if the verb refuses it. */
+export async function readForm(request: Request): Promise<FormData> {
+  const known = forms.get(request);
+  if (known) return known;
+  const form = await request.formData().catch(() => {
+    throw new Invalid({ "": ["The form could not be read. Send it again."] });
+  });
+  forms.set(request, form);
+  return form;
+}
+
+const SECRET_FIELD = /password|token/i;
+
+function typedValues(request: Request): Record<string, string> {
+  const values: Record<string, string> = {};
+  for (const [name, value] of forms.get(request) ?? []) {
+    if (typeof value === "string" && !SECRET_FIELD.test(name)) values[name] = value;
+  }
+  return values;
+}
+
+function pageProblem(error: AppError): PageProblem {
+  const { title, next } = answerFor(error);
+  return { kind: error.kind, title, detail: error.message, next };
+}
+
+function retryHeaders(error: AppError): Record<string, string> {
+  return error instanceof TooMany ? { "Retry-After": String(Math.ceil(error.retryAfterSeconds)) } : {};
+}
+
+/** Wraps a page's loader: what a verb throws becomes the status and the words of the table in errors.ts. */
+export function answered<A, R>(read: (args: A) => Promise<R> | R): (args: A) => Promise<R> {
+  return async (args) => {
+    try {
+      return await read(args);
+    } catch (error) {
+      if (!(error instanceof AppError)) throw error;
+      throw data(pageProblem(error), { status: answerFor(error).status, headers: retryHeaders(error) });
+    }
+  };
+}
+
+const BACK_TO_THE_FORM = new Set<ErrorKind>(["invalid", "conflict", "locked", "too-large", "too-many", "unavailable"]);
+
+/** Wraps a page's action: what a person can mend goes back to their form, the rest to the error page. */
+export function answeredAction<A extends { request: Request }, R>(act: (args: A) => Promise<R>) {
+  return async (args: A) => {
+    try {
+      return await act(args);
+    } catch (error) {
+      if (!(error instanceof AppError)) throw error;
+      const { status } = answerFor(error);
+      if (!BACK_TO_THE_FORM.has(error.kind)) throw data(pageProblem(error), { status });
+      const errors = error instanceof Invalid ? error.fields : { "": [error.message] };
+      const problem: FormProblem = {
+        problem: { kind: error.kind, message: error.message, errors, values: typedValues(args.request) },
+      };
+      return data(problem, { status, headers: retryHeaders(error) });
+    }
+  };
+}
+
+/** An RFC 9457 problem. `errors` names parameters or fields. */
+export function problem(
+  status: number,
+  title: string,
+  detail: string,
+  errors: { parameter: string; message: string }[] = [],
+  headers: Record<string, string> = {},
+): Response {
+  const body = { type: "about:blank", title, status, detail, ...(errors.length > 0 ? { errors } : {}) };
+  return Response.json(body, { status, headers: { "Content-Type": "application/problem+json", ...headers } });
+}
+
+export function problemFor(error: AppError): Response {
+  const { status, title } = answerFor(error);
+  const errors =
+    error instanceof Invalid
+      ? Object.entries(error.fields).flatMap(([parameter, messages]) =>
+          messages.map((message) => ({ parameter, message })),
+        )
+      : [];
+  return problem(status, title, error.message, errors, retryHeaders(error));
+}
+
+/** Wraps a resource route: what a verb throws becomes application/problem+json. */
+export function answeredApi<A>(answer: (args: A) => Promise<Response> | Response): (args: A) => Promise<Response> {
+  return async (args) => {
+    try {
+      return await answer(args);
+    } catch (error) {
+      if (!(error instanceof AppError)) throw error;
+      return problemFor(error);
+    }
+  };
+}
+
+const LOOPBACK = new Set(["localhost", "127.0.0.1", "[::1]"]);
+
+/** true where a page at `origin` may change things here. On this machine the loopback names are one place. */
+export function isOwnOrigin(origin: string | null, publicUrl: string): boolean {
+  if (!origin || !URL.canParse(origin)) return false;
+  const from = new URL(origin);
+  const own = new URL(publicUrl);
+  if (from.origin === own.origin) return true;
+  return (
+    LOOPBACK.has(own.hostname) &&
+    LOOPBACK.has(from.hostname) &&
+    from.port === own.port &&
+    from.protocol === own.protocol
+  );
+}
+
+/** Every unsafe request, resource routes included, must come from one of our own pages. */
+export const refuseForeignOrigins: MiddlewareFunction<Response> = async ({ request }, next) => {
+  if (SAFE_METHODS.has(request.method) || isOwnOrigin(request.headers.get("Origin"), env().PUBLIC_URL)) return next();
+  return problem(
+    403,
+    "This did not come from our own pages",
+    "A request that changes something must carry the Origin of this application. Open the page here and send it again.",
+  );
+};
+
+function contentSecurityPolicy(nonce: string): string {
+  const developing = process.env.NODE_ENV === "development";
+  // The development server injects styles and talks over a socket; what is served to people does neither.
+  const style = developing ? "'self' 'unsafe-inline'" : `'self' 'nonce-${nonce}'`;
+  return [
+    "default-src 'self'",
+    `script-src 'self' 'nonce-${nonce}'`,
+    `style-src ${style}`,
+    // Positions set from script: the stage's canvas and dragging.
+    "style-src-attr 'unsafe-inline'",
+    "img-src 'self' data: blob:",
+    "font-src 'self'",
+    `connect-src 'self'${developing ? " ws:" : ""}`,
+    "object-src 'none'",
+    "base-uri 'none'",
+    "form-action 'self'",
+    "frame-ancestors 'none'",
+  ].join("; ");
+}
+
+/** Nonce, request id and the usual headers, for pages and resource routes alike. */
+export const hardenResponses: MiddlewareFunction<Response> = async ({ request, context }, next) => {
+  const nonce = randomBytes(18).toString("base64");
+  context.set(nonceContext, nonce);
+  context.set(requestIdContext, randomBytes(9).toString("base64url"));
+  const response = await next();
+  const { headers } = response;
+  headers.set("Content-Security-Policy", contentSecurityPolicy(nonce));
+  headers.set("X-Content-Type-Options", "nosniff");
+  headers.set("X-Frame-Options", "DENY");
+  headers.set("Referrer-Policy", "same-origin");
+  headers.set("Cross-Origin-Opener-Policy", "same-origin");
+  headers.set("Cross-Origin-Resource-Policy", "same-origin");
+  headers.set("Permissions-Policy", "camera=(), microphone=(), geolocation=(), payment=()");
+  headers.set("X-Request-Id", context.get(requestIdContext));
+  if (env().PUBLIC_URL.startsWith("https:")) {
+    headers.set("Strict-Transport-Security", "max-age=31536000; includeSubDomains");
+  }
+  if (!headers.has("Cache-Control") && !new URL(request.url).pathname.startsWith("/assets/")) {
+    headers.set("Cache-Control", "private, no-store");
+  }
+  return response;
+};

@@ -24,6 +24,8 @@ const Environment = z.object({
   SMTP_URL: url(["smtp:", "smtps:"]),
   MAIL_FROM: z.string().min(3).default("Alidade <alidade@tern-point.example>"),
   SESSION_SECRET: z.string().min(32, "must have at least 32 characters"),
+  /** Printed at the foot of the office. */
+  CENTRE_NAME: z.string().min(1).default("Tern Point Science Centre"),
   PUBLIC_URL: url(["http:", "https:"]).transform((text) => text.replace(/\/+$/, "")),
   /** Only in local mode: the folder in which the mail catcher keeps what was sent. */
   MAIL_CATCHER_DIR: z.string().optional(),

@@ -1,0 +1,52 @@
+import type { ReactNode } from "react";
+import { Links, Meta, Outlet, Scripts, ScrollRestoration, useMatches, useRouteLoaderData } from "react-router";
+import type { Route } from "./+types/root";
+import "./app.css";
+import { RouteError } from "./routes/RouteError.tsx";
+import { pageFacts } from "./ui/page-handle.ts";
+import { SkipLink } from "./ui/SkipLink.tsx";
+import { themeFromCookie } from "./ui/theme-choice.ts";
+
+export const links: Route.LinksFunction = () => [{ rel: "icon", href: "/favicon.svg", type: "image/svg+xml" }];
+
+export const meta: Route.MetaFunction = () => [{ title: "Alidade" }];
+
+export function loader({ request }: Route.LoaderArgs) {
+  return { theme: themeFromCookie(request.headers.get("Cookie")) };
+}
+
+export function Layout({ children }: { children: ReactNode }) {
+  // Undefined when the root loader itself failed: the page must still stand.
+  const data = useRouteLoaderData<typeof loader>("root");
+  const { ground, language } = pageFacts(useMatches());
+  const theme = data?.theme === "system" ? undefined : data?.theme;
+  return (
+    <html lang={language} data-theme={theme}>
+      <head>
+        <meta charSet="utf-8" />
+        <meta name="viewport" content="width=device-width, initial-scale=1" />
+        <meta name="color-scheme" content={ground === "night" ? "dark" : "light dark"} />
+        <Meta />
+        <Links />
+      </head>
+      <body className={ground === "night" ? "night" : undefined}>
+        {ground === "night" ? null : <SkipLink />}
+        {children}
+        <ScrollRestoration />
+        <Scripts />
+      </body>
+    </html>
+  );
+}
+
+export default function Root() {
+  return <Outlet />;
+}
+
+export function ErrorBoundary({ error }: Route.ErrorBoundaryProps) {
+  return (
+    <main id="main" tabIndex={-1} className="page">
+      <RouteError error={error} />
+    </main>
+  );
+}

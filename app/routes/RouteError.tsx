@@ -1,0 +1,64 @@
+import { isRouteErrorResponse, useLocation } from "react-router";
+import { answerForStatus } from "#app/errors.ts";
+import { ErrorPage } from "#app/ui/ErrorPage.tsx";
+import { LinkButton } from "#app/ui/LinkButton.tsx";
+
+/** The page of a refusal or a failure: what happened, and what to do next, from the one table in errors.ts. */
+export function RouteError({ error }: { error: unknown }) {
+  const location = useLocation();
+  const here = location.pathname + location.search;
+  const { status, title, next } = isUnreachable(error) ? UNREACHABLE : answerForStatus(statusOf(error));
+  return (
+    <>
+      <title>{`${title} · Alidade`}</title>
+      <ErrorPage
+        status={status === null ? undefined : String(status)}
+        title={title}
+        detail={detailOf(error)}
+        next={next}
+        stack={import.meta.env.DEV && error instanceof Error ? error.stack : undefined}
+        actions={
+          <>
+            {status === 401 ? (
+              <LinkButton look="primary" to={`/sign-in?to=${encodeURIComponent(here)}`}>
+                Sign in
+              </LinkButton>
+            ) : null}
+            {status === null || status === 409 || status >= 500 ? (
+              <LinkButton look="primary" to={here} reloadDocument>
+                Load it again
+              </LinkButton>
+            ) : null}
+            <LinkButton to="/">Go to the desk</LinkButton>
+          </>
+        }
+      />
+    </>
+  );
+}
+
+const UNREACHABLE = {
+  status: null,
+  title: "The office cannot be reached",
+  next: "Look whether this machine is on the network. What you have typed stays on the page before this one.",
+};
+
+/** A browser's fetch fails with a TypeError when no answer comes at all. */
+function isUnreachable(error: unknown): boolean {
+  return error instanceof TypeError && /fetch|network|load failed/i.test(error.message);
+}
+
+function statusOf(error: unknown): number {
+  return isRouteErrorResponse(error) ? error.status : 500;
+}
+
+/** Only words that were written for people: never the message of an unexpected error. */
+function detailOf(error: unknown): string | undefined {
+  if (!isRouteErrorResponse(error)) return undefined;
+  const body: unknown = error.data;
+  if (typeof body === "object" && body !== null && "detail" in body && typeof body.detail === "string") {
+    return body.detail;
+  }
+  // The router's own refusals arrive as "Error: No route matches…".
+  return typeof body === "string" && body !== "" && !body.startsWith("Error:") ? body : undefined;
+}

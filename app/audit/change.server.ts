@@ -43,11 +43,7 @@ const ATTEMPTS = 4;
  * A deadlock or a row that changed under the snapshot runs the whole work again (it reads everything anew, and what
  * the person saw is guarded by version numbers).
  */
-export async function change<T>(
-  actor: Actor,
-  verb: string,
-  work: (change: Change) => Promise<T>,
-): Promise<T> {
+export async function change<T>(actor: Actor, verb: string, work: (change: Change) => Promise<T>): Promise<T> {
   for (let attempt = 1; ; attempt += 1) {
     try {
       return await db().transaction((tx) => once(tx, actor, verb, work));
@@ -63,12 +59,7 @@ export async function change<T>(
   }
 }
 
-async function once<T>(
-  tx: Transaction,
-  actor: Actor,
-  verb: string,
-  work: (change: Change) => Promise<T>,
-): Promise<T> {
+async function once<T>(tx: Transaction, actor: Actor, verb: string, work: (change: Change) => Promise<T>): Promise<T> {
   const notes: AuditNote[] = [];
   const mails: MailPromise[] = [];
   const touched: Touched[] = [];

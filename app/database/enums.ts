@@ -41,7 +41,7 @@ export type SealKind = (typeof SEAL_KINDS)[number];
 export const LANGUAGES = ["en", "fr"] as const;
 export type LanguageCode = (typeof LANGUAGES)[number];
 
-export const FIGURE_QUANTITIES = ["distance", "light-left"] as const;
+export const FIGURE_QUANTITIES = ["distance", "light-travel"] as const;
 export type FigureQuantity = (typeof FIGURE_QUANTITIES)[number];
 
 export const FIGURE_FORMS = ["value", "range", "value-and-range"] as const;

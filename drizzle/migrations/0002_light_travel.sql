@@ -1,0 +1,1 @@
+ALTER TABLE `scene_figure` MODIFY COLUMN `quantity` enum('distance','light-travel') NOT NULL;

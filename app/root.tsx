@@ -2,14 +2,14 @@ import type { ReactNode } from "react";
 import { Links, Meta, Outlet, Scripts, ScrollRestoration, useMatches, useRouteLoaderData } from "react-router";
 import type { Route } from "./+types/root";
 import "./app.css";
-import { RouteError } from "./routes/RouteError.tsx";
+import { errorTitle, RouteError } from "./routes/RouteError.tsx";
 import { pageFacts } from "./ui/page-handle.ts";
 import { SkipLink } from "./ui/SkipLink.tsx";
 import { themeFromCookie } from "./ui/theme-choice.ts";
 
 export const links: Route.LinksFunction = () => [{ rel: "icon", href: "/favicon.svg", type: "image/svg+xml" }];
 
-export const meta: Route.MetaFunction = () => [{ title: "Alidade" }];
+export const meta: Route.MetaFunction = ({ error }) => [{ title: error ? errorTitle(error) : "Alidade" }];
 
 export function loader({ request }: Route.LoaderArgs) {
   return { theme: themeFromCookie(request.headers.get("Cookie")) };

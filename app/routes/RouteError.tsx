@@ -7,34 +7,36 @@ import { LinkButton } from "#app/ui/LinkButton.tsx";
 export function RouteError({ error }: { error: unknown }) {
   const location = useLocation();
   const here = location.pathname + location.search;
-  const { status, title, next } = isUnreachable(error) ? UNREACHABLE : answerForStatus(statusOf(error));
+  const { status, title, next } = answerTo(error);
   return (
-    <>
-      <title>{`${title} · Alidade`}</title>
-      <ErrorPage
-        status={status === null ? undefined : String(status)}
-        title={title}
-        detail={detailOf(error)}
-        next={next}
-        stack={import.meta.env.DEV && error instanceof Error ? error.stack : undefined}
-        actions={
-          <>
-            {status === 401 ? (
-              <LinkButton look="primary" to={`/sign-in?to=${encodeURIComponent(here)}`}>
-                Sign in
-              </LinkButton>
-            ) : null}
-            {status === null || status === 409 || status >= 500 ? (
-              <LinkButton look="primary" to={here} reloadDocument>
-                Load it again
-              </LinkButton>
-            ) : null}
-            <LinkButton to="/">Go to the desk</LinkButton>
-          </>
-        }
-      />
-    </>
+    <ErrorPage
+      status={status === null ? undefined : String(status)}
+      title={title}
+      detail={detailOf(error)}
+      next={next}
+      stack={import.meta.env.DEV && error instanceof Error ? error.stack : undefined}
+      actions={
+        <>
+          {status === 401 ? (
+            <LinkButton look="primary" to={`/sign-in?to=${encodeURIComponent(here)}`}>
+              Sign in
+            </LinkButton>
+          ) : null}
+          {status === null || status === 409 || status >= 500 ? (
+            <LinkButton look="primary" to={here} reloadDocument>
+              Load it again
+            </LinkButton>
+          ) : null}
+          <LinkButton to="/">Go to the desk</LinkButton>
+        </>
+      }
+    />
   );
+}
+
+/** For the `meta` of a route with an error boundary. */
+export function errorTitle(error: unknown): string {
+  return `${answerTo(error).title} · Alidade`;
 }
 
 const UNREACHABLE = {
@@ -43,13 +45,13 @@ const UNREACHABLE = {
   next: "Look whether this machine is on the network. What you have typed stays on the page before this one.",
 };
 
+function answerTo(error: unknown) {
+  return isUnreachable(error) ? UNREACHABLE : answerForStatus(isRouteErrorResponse(error) ? error.status : 500);
+}
+
 /** A browser's fetch fails with a TypeError when no answer comes at all. */
 function isUnreachable(error: unknown): boolean {
   return error instanceof TypeError && /fetch|network|load failed/i.test(error.message);
-}
-
-function statusOf(error: unknown): number {
-  return isRouteErrorResponse(error) ? error.status : 500;
 }
 
 /** Only words that were written for people: never the message of an unexpected error. */

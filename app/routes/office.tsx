@@ -7,7 +7,7 @@ import { pageFacts } from "#app/ui/page-handle.ts";
 import type { ThemeChoice } from "#app/ui/theme-choice.ts";
 import type { Route } from "./+types/office";
 import { officePlaces, ROLE_WORDS } from "./office-places.ts";
-import { RouteError } from "./RouteError.tsx";
+import { errorTitle, RouteError } from "./RouteError.tsx";
 
 /** Nobody enters the office without signing in; what each may do there is asked again by each verb. */
 export const middleware: Route.MiddlewareFunction[] = [
@@ -27,6 +27,8 @@ export function loader({ context }: Route.LoaderArgs) {
     places: officePlaces(roles),
   };
 }
+
+export const meta: Route.MetaFunction = ({ error }) => [{ title: error ? errorTitle(error) : "Alidade" }];
 
 export default function Office({ loaderData }: Route.ComponentProps) {
   return (

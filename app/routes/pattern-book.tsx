@@ -1,5 +1,7 @@
-import { data, useSearchParams } from "react-router";
+import { useSearchParams } from "react-router";
 import { actorContext } from "#app/context.server.ts";
+import { Invalid } from "#app/errors.ts";
+import { answered, answeredAction } from "#app/http.server.ts";
 import { authorise } from "#app/people/authorise.ts";
 import { LinkButton } from "#app/ui/LinkButton.tsx";
 import { PageHead } from "#app/ui/PageHead.tsx";
@@ -13,25 +15,20 @@ import { TablePatterns } from "./pattern-book/TablePatterns.tsx";
 
 export const meta: Route.MetaFunction = () => [{ title: "Pattern book · Alidade" }];
 
-export function loader({ context }: Route.LoaderArgs) {
+export const loader = answered(({ context }: Route.LoaderArgs) => {
   authorise(context.get(actorContext), "people.manage");
   return null;
-}
+});
 
 /** Answers as a refused form would, so that the fields can be seen in that state. Nothing is kept. */
-export async function action({ context }: Route.ActionArgs) {
+export const action = answeredAction(async ({ context }: Route.ActionArgs): Promise<null> => {
   authorise(context.get(actorContext), "people.manage");
-  return data(
-    {
-      errors: {
-        "": ["Nothing was saved: the record was changed by somebody else."],
-        parallax: ["Write the parallax as a number, such as 130.23."],
-        source: ["Choose where it was published."],
-      },
-    },
-    400,
-  );
-}
+  throw new Invalid({
+    "": ["Nothing was saved: this book keeps nothing."],
+    parallax: ["Write the parallax as a number, such as 130.23."],
+    source: ["Choose where it was published."],
+  });
+});
 
 const CHAPTERS = [
   { id: "numbers", label: "Numbers", Chapter: NumberPatterns },
@@ -59,7 +56,7 @@ export default function PatternBook({ actionData }: Route.ComponentProps) {
         actions={<LinkButton to="?chapter=states&ask=withdraw">Ask a question</LinkButton>}
       />
       <Tabs label="Chapters" tabs={tabs} />
-      <current.Chapter errors={actionData?.errors} />
+      <current.Chapter errors={actionData?.problem.errors} />
     </>
   );
 }

@@ -23,27 +23,29 @@ export function OfficeFrame({ centre, person, places, theme, here, bleed, childr
   const foot = <OfficeFoot centre={centre} person={person} theme={theme} here={here} />;
   return (
     <div className="min-h-dvh lg:grid lg:grid-cols-[--spacing(42)_minmax(0,1fr)] print:block">
-      <details key={here} data-screen-only className="group border-b border-ink lg:hidden">
-        <summary className="tap flex list-none items-center justify-between px-5 py-2 font-head">
-          <span className="text-lg font-bold">Alidade</span>
-          <span className="text-sm font-medium underline decoration-edge underline-offset-4">
-            <span className="group-open:hidden">Places</span>
-            <span className="hidden group-open:inline">Close</span>
-          </span>
-        </summary>
-        <div className="grid gap-6 px-5 pb-6">
-          <OfficePlaces groups={places} />
-          {foot}
-        </div>
-      </details>
-      <div
+      <header data-screen-only className="border-b border-ink lg:hidden">
+        <details key={here} className="group">
+          <summary className="tap flex list-none items-center justify-between px-5 py-2 font-head">
+            <span className="text-lg font-bold">Alidade</span>
+            <span className="text-sm font-medium underline decoration-edge underline-offset-4">
+              <span className="group-open:hidden">Places</span>
+              <span className="hidden group-open:inline">Close</span>
+            </span>
+          </summary>
+          <div className="grid gap-6 px-5 pb-6">
+            <OfficePlaces groups={places} />
+            {foot}
+          </div>
+        </details>
+      </header>
+      <header
         data-screen-only
         className="sticky top-0 flex h-dvh flex-col gap-8 overflow-y-auto border-r border-rule py-7 pl-7 max-lg:hidden"
       >
         <p className="font-head text-lg font-bold">Alidade</p>
         <OfficePlaces groups={places} />
         <div className="mt-auto pr-4">{foot}</div>
-      </div>
+      </header>
       <main id="main" tabIndex={-1} className={classes("min-w-0 focus-visible:outline-none", !bleed && "page")}>
         {children}
       </main>

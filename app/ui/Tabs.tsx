@@ -1,4 +1,4 @@
-import { NavLink } from "react-router";
+import { Link, NavLink } from "react-router";
 import { classes } from "./classes.ts";
 
 export interface Tab {
@@ -23,20 +23,32 @@ export function Tabs({ label, tabs }: TabsProps) {
       <ul className="-mb-px flex flex-wrap gap-x-6">
         {tabs.map((tab) => (
           <li key={tab.to}>
-            <NavLink
-              to={tab.to}
-              end
-              preventScrollReset
-              aria-current={tab.current === false ? undefined : "page"}
-              className={({ isActive }) => tabClass(tab.current ?? isActive)}
-            >
-              {tab.label}
-              {tab.count ? <span className="num text-ink-soft">{tab.count}</span> : null}
-            </NavLink>
+            <TabLink {...tab} />
           </li>
         ))}
       </ul>
     </nav>
+  );
+}
+
+function TabLink({ to, label, count, current }: Tab) {
+  const words = (
+    <>
+      {label}
+      {count ? <span className="num text-ink-soft">{count}</span> : null}
+    </>
+  );
+  if (current === undefined) {
+    return (
+      <NavLink to={to} end preventScrollReset className={({ isActive }) => tabClass(isActive)}>
+        {words}
+      </NavLink>
+    );
+  }
+  return (
+    <Link to={to} preventScrollReset aria-current={current ? "page" : undefined} className={tabClass(current)}>
+      {words}
+    </Link>
   );
 }
 

@@ -45,7 +45,12 @@ export function spreadGeometry(spread: Spread, domain: Domain): SpreadGeometry {
 export function logPlace([min, max]: Domain): (value: number) => number {
   if (!(min > 0 && max > min && Number.isFinite(max))) throw new RangeError(`Not a log axis: ${min} to ${max}`);
   const span = Math.log(max / min);
-  return (value) => (value > 0 ? (100 * Math.log(value / min)) / span : Number.NEGATIVE_INFINITY);
+  return (value) => (value > 0 ? rounded((100 * Math.log(value / min)) / span) : Number.NEGATIVE_INFINITY);
+}
+
+/** To a thousandth of a percent: engines differ in the last bit of a logarithm, and server and browser must agree. */
+function rounded(percent: number): number {
+  return Math.round(percent * 1000) / 1000;
 }
 
 function band(low: number, high: number, place: (value: number) => number): Band | null {
@@ -54,7 +59,7 @@ function band(low: number, high: number, place: (value: number) => number): Band
   const to = place(high);
   if (to < 0 || from > 100) return null;
   const start = Math.max(0, from);
-  return { start, width: Math.min(100, to) - start, openStart: from < 0, openEnd: to > 100 };
+  return { start, width: rounded(Math.min(100, to) - start), openStart: from < 0, openEnd: to > 100 };
 }
 
 /**

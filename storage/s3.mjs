@@ -1,0 +1,53 @@
+import { spawn } from "node:child_process";
+import { mkdirSync, openSync, writeFileSync } from "node:fs";
+import { join } from "node:path";
+import { setTimeout as pause } from "node:timers/promises";
+import { ROOT } from "./paths.mjs";
+import { freePort } from "./ports.mjs";
+
+export const BUCKET = "alidade-media";
+
+/**
+ * Starts the S3 stand-in on loopback. Its data is plain files under `folder`.
+ * @param {string} folder
+ */
+export async function startS3(folder) {
+  mkdirSync(join(folder, "data"), { recursive: true });
+  const port = await freePort();
+  const log = openSync(join(folder, "s3.log"), "a");
+  const child = spawn(
+    process.execPath,
+    [
+      // s3rver signs with digests that OpenSSL 3 calls legacy.
+      "--openssl-legacy-provider",
+      join(ROOT, "node_modules", "s3rver", "bin", "s3rver.js"),
+      "--directory",
+      join(folder, "data"),
+      "--address",
+      "127.0.0.1",
+      "--port",
+      String(port),
+      "--configure-bucket",
+      BUCKET,
+    ],
+    { stdio: ["ignore", log, log], detached: true },
+  );
+  writeFileSync(join(folder, "port"), String(port));
+  const endpoint = `http://127.0.0.1:${port}`;
+  for (let tries = 0; tries < 200; tries += 1) {
+    if (child.exitCode !== null) throw new Error(`The S3 stand-in did not start; see ${join(folder, "s3.log")}.`);
+    if (await fetch(endpoint).then(() => true, () => false)) break;
+    await pause(50);
+  }
+  return {
+    process: child,
+    environment: {
+      S3_ENDPOINT: endpoint,
+      S3_REGION: "us-east-1",
+      S3_BUCKET: BUCKET,
+      S3_ACCESS_KEY_ID: "S3RVER",
+      S3_SECRET_ACCESS_KEY: "S3RVER",
+    },
+    stop: async () => void child.kill("SIGTERM"),
+  };
+}

@@ -2,10 +2,13 @@ import type { ReactNode } from "react";
 import { Links, Meta, Outlet, Scripts, ScrollRestoration, useMatches, useRouteLoaderData } from "react-router";
 import type { Route } from "./+types/root";
 import "./app.css";
+import { hardenResponses, refuseForeignOrigins } from "./http.server.ts";
 import { errorTitle, RouteError } from "./routes/RouteError.tsx";
 import { pageFacts } from "./ui/page-handle.ts";
 import { SkipLink } from "./ui/SkipLink.tsx";
 import { themeFromCookie } from "./ui/theme-choice.ts";
+
+export const middleware: Route.MiddlewareFunction[] = [hardenResponses, refuseForeignOrigins];
 
 export const links: Route.LinksFunction = () => [{ rel: "icon", href: "/favicon.svg", type: "image/svg+xml" }];
 
@@ -25,7 +28,7 @@ export function Layout({ children }: { children: ReactNode }) {
       <head>
         <meta charSet="utf-8" />
         <meta name="viewport" content="width=device-width, initial-scale=1" />
-        <meta name="color-scheme" content={ground === "night" ? "dark" : "light dark"} />
+        <meta name="color-scheme" content={ground === "night" ? "dark" : (theme ?? "light dark")} />
         <Meta />
         <Links />
       </head>

@@ -9,7 +9,9 @@ export default [
     // exhibits, media
     // reviews, editions, kiosks
     // people, audit, mail, account, pattern book
+    route("pattern-book", "routes/pattern-book.tsx"),
   ]),
+  route("theme", "routes/theme.ts"),
   // -- signing in --
   // -- api --
   // -- feeds, pictures, kiosks: anybody --

@@ -53,7 +53,7 @@ export default function PatternBook({ actionData }: Route.ComponentProps) {
             in use
           </StateMark>
         }
-        actions={<LinkButton to="?chapter=states&ask=withdraw">Ask a question</LinkButton>}
+        actions={<LinkButton to="?chapter=states&ask=withdraw#dialog">Ask a question</LinkButton>}
       />
       <Tabs label="Chapters" tabs={tabs} />
       <current.Chapter errors={actionData?.problem.errors} />

@@ -13,16 +13,16 @@ interface BigNumberProps {
   children?: ReactNode;
 }
 
-/** A number set larger than its label. */
+/** A number set larger than its label. It stands alone, so its numerals are proportional: the face's tabular 1 is all foot. */
 export function BigNumber({ label, value, unit, range, size = "large", children }: BigNumberProps) {
   return (
     <div>
       <p className="label">{label}</p>
-      <p className="num flex flex-wrap items-baseline gap-x-2 font-head">
+      <p className="flex flex-wrap items-baseline gap-x-2 font-head">
         <span
           className={classes(
             "font-medium tracking-[-0.03em]",
-            size === "large" ? "text-4xl md:text-5xl" : "text-2xl tracking-[-0.02em]",
+            size === "large" ? "text-4xl forced-colors:leading-[1.3] md:text-5xl" : "text-2xl tracking-[-0.02em]",
           )}
         >
           {value}
@@ -32,7 +32,7 @@ export function BigNumber({ label, value, unit, range, size = "large", children 
         ) : null}
       </p>
       {range ? (
-        <p className={classes("num font-head text-vermilion", size === "large" ? "text-lg" : "text-base")}>{range}</p>
+        <p className={classes("font-head text-vermilion", size === "large" ? "text-lg" : "text-base")}>{range}</p>
       ) : null}
       {children ? <div className="mt-3">{children}</div> : null}
     </div>

@@ -22,8 +22,10 @@ export function Checkbox({ label, hint, error, className, ...input }: CheckboxPr
           {label}
         </label>
       </span>
-      {hint ? <FieldHint id={wiring.hintId}>{hint}</FieldHint> : null}
-      <FieldMessages wiring={wiring} />
+      <div className="pl-8 empty:hidden">
+        {hint ? <FieldHint id={wiring.hintId}>{hint}</FieldHint> : null}
+        <FieldMessages wiring={wiring} />
+      </div>
     </div>
   );
 }

@@ -9,8 +9,8 @@ interface DialogProps {
 }
 
 /**
- * A question over the page. Render it when the address asks for it, and link to that address: without JavaScript it stands
- * open in the flow of the page; with it, it is a modal dialog that Escape closes.
+ * A question over the page. Render it when the address asks for it, and link to that address with `#dialog` behind it:
+ * without JavaScript it stands open in the flow of the page; with it, it is a modal dialog that Escape closes.
  */
 export function Dialog({ title, closeTo, children }: DialogProps) {
   const dialog = useRef<HTMLDialogElement>(null);
@@ -21,9 +21,12 @@ export function Dialog({ title, closeTo, children }: DialogProps) {
     if (!element || element.matches(":modal")) return;
     element.close();
     element.showModal();
+    // A question that asks for something begins at its field; one that does not begins at the way out.
+    element.querySelector<HTMLElement>("input:not([type=hidden]), select, textarea")?.focus();
   }, []);
   return (
     <dialog
+      id="dialog"
       ref={dialog}
       open
       aria-labelledby={titleId}

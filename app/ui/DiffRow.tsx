@@ -13,7 +13,7 @@ interface DiffRowProps {
 /** One thing that changed: before, then now. */
 export function DiffRow({ label, before, after, verdict }: DiffRowProps) {
   return (
-    <div className="grid gap-x-4 gap-y-1 border-b border-rule py-2 md:grid-cols-[minmax(8rem,1fr)_2fr_2fr_auto]">
+    <div className="grid gap-x-4 gap-y-1 border-b border-rule py-2 md:grid-cols-[minmax(8rem,1fr)_2fr_2fr_9rem]">
       <p className="label self-center">{label}</p>
       <p className="num text-ink-soft">
         <span className="label mr-2">before</span>
@@ -23,7 +23,7 @@ export function DiffRow({ label, before, after, verdict }: DiffRowProps) {
         <span className="label mr-2">now</span>
         {after === null ? "nothing" : <ins className="bg-brass-wash px-0.5 no-underline">{after}</ins>}
       </p>
-      {verdict ? <p className="self-center">{verdict}</p> : null}
+      {verdict ? <p className="self-center md:text-right">{verdict}</p> : null}
     </div>
   );
 }

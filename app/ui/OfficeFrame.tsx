@@ -38,13 +38,12 @@ export function OfficeFrame({ centre, person, places, theme, here, bleed, childr
           </div>
         </details>
       </header>
-      <header
-        data-screen-only
-        className="sticky top-0 flex h-dvh flex-col gap-8 overflow-y-auto border-r border-rule py-7 pl-7 max-lg:hidden"
-      >
-        <p className="font-head text-lg font-bold">Alidade</p>
-        <OfficePlaces groups={places} />
-        <div className="mt-auto pr-4">{foot}</div>
+      <header data-screen-only className="border-r border-rule max-lg:hidden">
+        <div className="sticky top-0 -mr-px forced-colors:mr-0 flex h-dvh flex-col gap-8 overflow-y-auto py-7 pl-7">
+          <p className="font-head text-lg font-bold">Alidade</p>
+          <OfficePlaces groups={places} />
+          <div className="mt-auto pr-4">{foot}</div>
+        </div>
       </header>
       <main id="main" tabIndex={-1} className={classes("min-w-0 focus-visible:outline-none", !bleed && "page")}>
         {children}

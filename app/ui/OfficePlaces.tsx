@@ -30,6 +30,8 @@ export function OfficePlaces({ groups }: { groups: readonly (readonly Place[])[]
 function placeClass(current: boolean): string {
   return classes(
     "flex min-h-8 items-center justify-between gap-2 border-r-3 pr-4 font-head text-sm max-lg:min-h-11 max-lg:border-r-0 max-lg:border-l-3 max-lg:pl-3",
-    current ? "border-ink font-bold text-ink" : "border-transparent text-ink-soft hover:text-ink hover:underline",
+    current
+      ? "border-ink font-bold text-ink"
+      : "border-transparent text-ink-soft forced-colors:border-[Canvas] hover:text-ink hover:underline",
   );
 }

@@ -33,7 +33,7 @@ export function Select(props: SelectProps) {
       required={input.required}
       className={className}
     >
-      <select {...input} id={wiring.id} {...wiring.aria} className={CONTROL_CLASS}>
+      <select {...input} id={wiring.id} {...wiring.aria} className={`${CONTROL_CLASS} pl-2`}>
         {placeholder === undefined ? null : <option value="">{placeholder}</option>}
         {options.map((option) => (
           <option key={option.value} value={option.value} disabled={option.disabled}>

@@ -25,11 +25,13 @@ const SIZES = {
   large: { height: 28, axis: 14, band: 9, mark: 24 },
 };
 const LABEL_ROOM = 20;
+/** Narrower than this a band would hide behind the mark of the value. */
+const HAIR_PERCENT = 2;
 
 /**
  * Low, value, high on a log axis: the same mark in tables, review, kiosk and print. Horizontal places are percentages, so
- * it grows with its box while its lines keep their weight. Bands are never thinner than their outline, so that a very
- * small uncertainty is still seen.
+ * it grows with its box while its lines keep their weight. A band that would
+ * vanish behind the mark of its value gets an outline, so that a very small uncertainty is still seen.
  */
 export function SpreadBar(props: SpreadBarProps) {
   const { label, domain = fitDomain([props]), ticks = [], size = "small", muted, className } = props;
@@ -47,9 +49,9 @@ export function SpreadBar(props: SpreadBarProps) {
       data-mark
       className={classes("block overflow-visible", className)}
     >
-      <line x1="0" x2="100%" y1={axis} y2={axis} className="stroke-rule forced-colors:stroke-[GrayText]" />
-      <Bar band={bar.band90} axis={axis} height={shape.band + 4} wide={size === "large"} muted={muted} pale />
-      <Bar band={bar.band68} axis={axis} height={shape.band} wide={size === "large"} muted={muted} />
+      <line x1="0" x2="100%" y1={axis} y2={axis} className="stroke-rule forced-colors:stroke-[CanvasText]" />
+      <Bar band={bar.band90} axis={axis} height={shape.band + 4} muted={muted} pale />
+      <Bar band={bar.band68} axis={axis} height={shape.band} muted={muted} />
       {shown.map((tick) => (
         <Tick key={tick.at} tick={tick} place={logPlace(domain)(tick.at)} axis={axis} />
       ))}
@@ -71,12 +73,11 @@ interface BarProps {
   band: Band | null;
   axis: number;
   height: number;
-  wide: boolean;
   muted: boolean | undefined;
   pale?: boolean;
 }
 
-function Bar({ band, axis, height, wide, muted, pale }: BarProps) {
+function Bar({ band, axis, height, muted, pale }: BarProps) {
   if (!band) return null;
   const look = classes(
     "fill-vermilion stroke-vermilion forced-colors:fill-[Highlight] forced-colors:stroke-[Highlight]",
@@ -89,7 +90,7 @@ function Bar({ band, axis, height, wide, muted, pale }: BarProps) {
         y={axis - height / 2}
         width={`${band.width}%`}
         height={height}
-        strokeWidth={pale ? 0 : wide ? 3 : 2}
+        strokeWidth={!pale && band.width < HAIR_PERCENT ? 5 : 0}
       />
       {band.openStart ? <OpenEnd at="0%" axis={axis} height={height} turn={-1} /> : null}
       {band.openEnd ? <OpenEnd at="100%" axis={axis} height={height} turn={1} /> : null}
@@ -114,7 +115,7 @@ function Tick({ tick, place, axis }: { tick: SpreadTick; place: number; axis: nu
     <g>
       <line x1={`${place}%`} x2={`${place}%`} y1={axis - 4} y2={axis + 4} className="stroke-ink-soft" />
       {tick.label ? (
-        <text x={`${place}%`} y={13} textAnchor={anchor} className="num fill-ink-soft font-head text-xs">
+        <text x={`${place}%`} y={13} textAnchor={anchor} className="fill-ink-soft font-head text-xs">
           {tick.label}
         </text>
       ) : null}

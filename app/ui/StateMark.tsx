@@ -9,7 +9,7 @@ const TONES: Record<StateTone, string> = {
   live: "border-verdigris text-verdigris",
   sealed: "border-brass text-brass",
   person: "border-vermilion text-vermilion",
-  none: "border-transparent text-ink-soft",
+  none: "border-transparent text-ink-soft forced-colors:border-[Canvas]",
 };
 
 interface StateMarkProps {

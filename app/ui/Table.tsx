@@ -106,7 +106,7 @@ function Cell<Row>({ column, row }: { column: Column<Row>; row: Row }) {
       <span aria-hidden="true" className={column.headHidden ? "hidden" : "label shrink-0 md:hidden"}>
         {column.head}
       </span>
-      <div className="max-md:text-right">{content}</div>
+      <div className={column.headHidden ? "max-md:grow" : "max-md:text-right"}>{content}</div>
     </td>
   );
 }

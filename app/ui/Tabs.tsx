@@ -20,7 +20,7 @@ interface TabsProps {
 export function Tabs({ label, tabs }: TabsProps) {
   return (
     <nav aria-label={label} className="mb-6 border-b border-rule">
-      <ul className="-mb-px flex flex-wrap gap-x-6">
+      <ul className="-mb-px forced-colors:mb-0 flex flex-wrap gap-x-6">
         {tabs.map((tab) => (
           <li key={tab.to}>
             <TabLink {...tab} />
@@ -55,6 +55,8 @@ function TabLink({ to, label, count, current }: Tab) {
 function tabClass(current: boolean): string {
   return classes(
     "tap flex items-center gap-2 border-b-3 font-head text-sm",
-    current ? "border-ink font-medium text-ink" : "border-transparent text-ink-soft hover:border-rule hover:text-ink",
+    current
+      ? "border-ink font-medium text-ink"
+      : "border-transparent text-ink-soft forced-colors:border-[Canvas] hover:border-rule hover:text-ink",
   );
 }

@@ -20,7 +20,9 @@ export function ThemeForm({ theme, here }: { theme: ThemeChoice; here: string })
             aria-pressed={choice === theme}
             className={classes(
               "min-h-8 border-b-2",
-              choice === theme ? "border-ink font-medium text-ink" : "border-transparent text-ink-soft hover:text-ink",
+              choice === theme
+                ? "border-ink font-medium text-ink"
+                : "border-transparent text-ink-soft forced-colors:border-[Canvas] hover:text-ink",
             )}
           >
             {WORDS[choice]}
@@ -31,4 +33,4 @@ export function ThemeForm({ theme, here }: { theme: ThemeChoice; here: string })
   );
 }
 
-const WORDS: Record<ThemeChoice, string> = { system: "as system", light: "day", dark: "lamp" };
+const WORDS: Record<ThemeChoice, string> = { system: "auto", light: "day", dark: "lamp" };

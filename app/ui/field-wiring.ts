@@ -54,4 +54,5 @@ export function wireField(input: {
 export const CONTROL_CLASS =
   "tap w-full border border-edge bg-sheet px-3 py-1.5 text-base text-ink hover:border-ink " +
   "aria-invalid:border-2 aria-invalid:border-vermilion disabled:bg-paper-shade disabled:text-ink-soft " +
-  "read-only:not-[select]:bg-paper-shade";
+  "[&[readonly]]:bg-paper-shade file:mr-3 file:border-0 file:border-r file:border-edge file:bg-transparent file:pr-3 " +
+  "file:font-head file:text-sm file:font-medium";

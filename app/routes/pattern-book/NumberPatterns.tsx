@@ -1,5 +1,6 @@
 import { BigNumber } from "#app/ui/BigNumber.tsx";
 import { BoundFigure } from "#app/ui/BoundFigure.tsx";
+import { Button } from "#app/ui/Button.tsx";
 import { SpreadBar } from "#app/ui/SpreadBar.tsx";
 import { Time } from "#app/ui/Time.tsx";
 import { Pattern } from "./Chapter.tsx";
@@ -88,9 +89,12 @@ export function NumberPatterns() {
                 label="103.9 light-years, 103.1 to 104.7"
               />
             </BigNumber>
-            <p className="text-lg text-ink-soft">
-              The light you see tonight set out in <BoundFigure>1922 or 1923</BoundFigure>.
-            </p>
+            <div className="grid content-start justify-items-start gap-6">
+              <p className="text-lg text-ink-soft">
+                The light you see tonight set out in <BoundFigure>1922 or 1923</BoundFigure>.
+              </p>
+              <Button className="target-mm-14">How do we know?</Button>
+            </div>
           </div>
         </Pattern>
       </div>

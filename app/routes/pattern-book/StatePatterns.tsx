@@ -50,7 +50,7 @@ export function StatePatterns() {
           </div>
         </Pattern>
         <Pattern title="A question over the page">
-          <LinkButton look="danger" to={`${HERE}&ask=withdraw`} preventScrollReset>
+          <LinkButton look="danger" to={`${HERE}&ask=withdraw#dialog`} preventScrollReset>
             Withdraw…
           </LinkButton>
         </Pattern>

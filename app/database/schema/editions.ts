@@ -16,7 +16,7 @@ export const edition = mysqlTable(
     /** SHA-256 of `content`; equals the digest that was verified and approved. */
     digest: digest("digest").notNull(),
     content: bytes("content").notNull(),
-    /** Scene id -> digest of its still in storage. */
+    /** "<scene id>:<language>" -> SHA-256 of its still in storage. */
     stills: json<Record<string, string>>("stills").notNull(),
     sealId: ref("seal_id")
       .notNull()

@@ -1,5 +1,5 @@
 import { index, int, mysqlEnum, mysqlTable, uniqueIndex } from "drizzle-orm/mysql-core";
-import { createdAt, exact, id, instant, ref, version, words } from "../columns.ts";
+import { createdAt, exact, id, ref, version, words } from "../columns.ts";
 import { LANGUAGES } from "../enums.ts";
 import { exhibit } from "./exhibits.ts";
 
@@ -15,9 +15,6 @@ export const kiosk = mysqlTable(
     language: mysqlEnum("language", LANGUAGES).notNull().default("en"),
     /** Seconds without a touch before the page asks, then starts again. */
     idleSeconds: int("idle_seconds").notNull().default(60),
-    /** What the page last said it shows. */
-    shownEdition: int("shown_edition"),
-    shownAt: instant("shown_at"),
     createdAt: createdAt(),
     version: version(),
   },

@@ -1,0 +1,2 @@
+ALTER TABLE `kiosk` DROP COLUMN `shown_edition`;--> statement-breakpoint
+ALTER TABLE `kiosk` DROP COLUMN `shown_at`;

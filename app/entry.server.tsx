@@ -4,6 +4,7 @@ import { isbot } from "isbot";
 import { renderToPipeableStream } from "react-dom/server";
 import { type EntryContext, type RouterContextProvider, ServerRouter } from "react-router";
 import { nonceContext } from "./context.server.ts";
+import { NonceContext } from "./ui/nonce-context.ts";
 
 export const streamTimeout = 5_000;
 
@@ -29,17 +30,22 @@ export default function handleRequest(
       pipe(body);
     };
     let failed = false;
-    const { pipe, abort } = renderToPipeableStream(<ServerRouter context={entry} url={request.url} nonce={nonce} />, {
-      nonce,
-      onShellReady: whole ? undefined : answer,
-      onAllReady: whole ? answer : undefined,
-      onShellError: reject,
-      onError(error) {
-        failed = true;
-        // Errors before the shell reject the promise and are reported there.
-        if (answered) console.error(error);
+    const { pipe, abort } = renderToPipeableStream(
+      <NonceContext value={nonce ?? ""}>
+        <ServerRouter context={entry} url={request.url} nonce={nonce} />
+      </NonceContext>,
+      {
+        nonce,
+        onShellReady: whole ? undefined : answer,
+        onAllReady: whole ? answer : undefined,
+        onShellError: reject,
+        onError(error) {
+          failed = true;
+          // Errors before the shell reject the promise and are reported there.
+          if (answered) console.error(error);
+        },
       },
-    });
+    );
     // A second later than the loaders' own limit, so that their refusals still reach the page.
     setTimeout(abort, streamTimeout + 1000).unref();
   });

@@ -1,9 +1,10 @@
-import type { ReactNode } from "react";
+import { type ReactNode, useContext } from "react";
 import { Links, Meta, Outlet, Scripts, ScrollRestoration, useMatches, useRouteLoaderData } from "react-router";
 import type { Route } from "./+types/root";
 import "./app.css";
 import { hardenResponses, refuseForeignOrigins } from "./http.server.ts";
 import { errorTitle, RouteError } from "./routes/RouteError.tsx";
+import { NonceContext } from "./ui/nonce-context.ts";
 import { pageFacts } from "./ui/page-handle.ts";
 import { SkipLink } from "./ui/SkipLink.tsx";
 import { themeFromCookie } from "./ui/theme-choice.ts";
@@ -21,6 +22,7 @@ export function loader({ request }: Route.LoaderArgs) {
 export function Layout({ children }: { children: ReactNode }) {
   // Undefined when the root loader itself failed: the page must still stand.
   const data = useRouteLoaderData<typeof loader>("root");
+  const nonce = useContext(NonceContext);
   const { ground, language } = pageFacts(useMatches());
   const theme = data?.theme === "system" ? undefined : data?.theme;
   return (
@@ -30,13 +32,14 @@ export function Layout({ children }: { children: ReactNode }) {
         <meta name="viewport" content="width=device-width, initial-scale=1" />
         <meta name="color-scheme" content={ground === "night" ? "dark" : (theme ?? "light dark")} />
         <Meta />
-        <Links />
+        {/* Style sheets are our own files and need no nonce; browsers do not hide one on a link, and hydration would differ. */}
+        <Links nonce="" />
       </head>
       <body className={ground === "night" ? "night" : undefined}>
         {ground === "night" ? null : <SkipLink />}
         {children}
-        <ScrollRestoration />
-        <Scripts />
+        <ScrollRestoration nonce={nonce} />
+        <Scripts nonce={nonce} />
       </body>
     </html>
   );

@@ -25,7 +25,7 @@ export function OfficeFrame({ centre, person, places, theme, here, bleed, childr
     <div className="min-h-dvh lg:grid lg:grid-cols-[--spacing(42)_minmax(0,1fr)] print:block">
       <header data-screen-only className="border-b border-ink lg:hidden">
         <details key={here} className="group">
-          <summary className="tap flex list-none items-center justify-between px-5 py-2 font-head">
+          <summary className="tap flex list-none items-center justify-between px-5 py-2 font-head focus-visible:-outline-offset-4">
             <span className="text-lg font-bold">Alidade</span>
             <span className="text-sm font-medium underline decoration-edge underline-offset-4">
               <span className="group-open:hidden">Places</span>

@@ -21,7 +21,7 @@ export function DiffRow({ label, before, after, verdict }: DiffRowProps) {
       </p>
       <p className="num">
         <span className="label mr-2">now</span>
-        {after === null ? "nothing" : <ins className="bg-brass-wash px-0.5 no-underline">{after}</ins>}
+        {after === null ? "nothing" : <ins className="bg-paper-shade px-0.5 font-semibold no-underline">{after}</ins>}
       </p>
       {verdict ? <p className="self-center md:text-right">{verdict}</p> : null}
     </div>

@@ -4,8 +4,9 @@ import { classes } from "./classes.ts";
 export type NoticeTone = "info" | "success" | "warning" | "error";
 
 const TONES: Record<NoticeTone, string> = {
-  info: "border-ink bg-paper-shade",
-  success: "border-verdigris bg-verdigris-wash",
+  info: "border-edge bg-paper-shade",
+  // Not verdigris: that a thing was saved does not make it vetted or live.
+  success: "border-ink bg-paper-shade",
   warning: "border-vermilion bg-paper-shade",
   error: "border-vermilion bg-vermilion-wash",
 };

@@ -46,8 +46,8 @@ test("common practice: 3.26 ly and 206 265 au to the parsec, half an arcsecond i
   expect(inversePc(0.01)).toBe(100);
 });
 
-// p, s (mas), L, mode, 5 %, 16 %, 50 %, 84 %, 95 % (pc). Compared to 1e-6, as every posterior: the paper's last digits
-// came from a coarser quadrature (its 7.700126 is 7.7001254 by scipy in the committed table and here).
+// p, s (mas), L, mode, 5 %, 16 %, 50 %, 84 %, 95 % (pc). Compared to 1e-6, as every posterior: not every
+// last digit of the paper holds (its 7.700126 is 7.7001254 by scipy in the committed table, and here).
 const EDSD = `
   130.23 0.36 1350 7.678839   7.644197  7.657904  7.678957  7.700126  7.714034
   10     1    1350 102.00228  88.770507 94.315977 104.29923 116.68950 126.55411

@@ -1,4 +1,4 @@
-import { gaussLegendre } from "./gauss-legendre.ts";
+import { gaussLegendre, type Rule } from "./gauss-legendre.ts";
 import type { AnchoredDensity } from "./posterior-density.ts";
 
 /** One panel of the composite rule, with the probability (not normalised) in it. */
@@ -30,14 +30,15 @@ const SHALLOW = 28;
 const LONGEST = 1.6;
 const STEEPEST = 5;
 
-const RULE = gaussLegendre(16);
+/** For a panel, and for a step of an eighth of one or less. */
+const PANEL_RULE = gaussLegendre(16);
+const STEP_RULE = gaussLegendre(8);
 
-/** Integral of the density from one v to another, by sixteen Gauss-Legendre nodes. */
-export function integrate(density: (v: number) => number, from: number, to: number): number {
+function integrate(density: Mass["density"], from: number, to: number, { nodes, weights }: Rule): number {
   const half = (to - from) / 2;
   const middle = from + half;
   let sum = 0;
-  for (let i = 0; i < 16; i++) sum += RULE.weights[i]! * density(middle + half * RULE.nodes[i]!);
+  for (let i = 0; i < nodes.length; i++) sum += weights[i]! * density(middle + half * nodes[i]!);
   return half * sum;
 }
 
@@ -79,7 +80,7 @@ export function probabilityMass(log: AnchoredDensity, stretches: Stretch[], peak
     const steepness = Math.max(Math.abs(logFrom - logMiddle), Math.abs(logTo - logMiddle));
     const tame = to - from <= LONGEST && steepness <= STEEPEST;
     if (negligible || tame || middle <= from || middle >= to) {
-      panels.push({ from, to, mass: integrate(density, from, to) });
+      panels.push({ from, to, mass: integrate(density, from, to, PANEL_RULE) });
       return;
     }
     divide(from, logFrom, middle, logMiddle);
@@ -106,14 +107,14 @@ function solve({ from, to, mass }: Panel, density: Mass["density"], wanted: numb
   const tolerance = 1e-13 * (to - from);
   let [low, high] = [from, to];
   let v = from + (to - from) * (wanted / mass);
-  let below = integrate(density, from, v);
+  let below = integrate(density, from, v, PANEL_RULE);
   for (let turn = 0; turn < 100; turn++) {
     if (below < wanted) low = v;
     else high = v;
     const newton = v + (wanted - below) / density(v);
     const next = newton >= low && newton <= high ? newton : (low + high) / 2;
     if (Math.abs(next - v) <= tolerance) return next;
-    below += integrate(density, v, next);
+    below += integrate(density, v, next, Math.abs(next - v) <= (to - from) / 8 ? STEP_RULE : PANEL_RULE);
     v = next;
   }
   return v;

@@ -13,7 +13,7 @@ import {
   PC_LY,
   PC_M,
 } from "#app/astrometry/units.ts";
-import { expectClose } from "./table.ts";
+import { expectClose } from "./check.ts";
 
 // The check values of the project's methods paper, digit by digit as printed there: half of the last digit is allowed.
 

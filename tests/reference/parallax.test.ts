@@ -1,7 +1,8 @@
 import { expect, test } from "vitest";
 import { distanceFromParallax } from "#app/astrometry/distance.ts";
 import { invertParallax, type Regime, regimeOf } from "#app/astrometry/parallax.ts";
-import { checkAll, expectClose, readTable } from "./table.ts";
+import { checkAll, expectClose } from "./check.ts";
+import { readTable } from "./table.ts";
 
 interface Case {
   parallaxMas: number;

@@ -1,6 +1,7 @@
 import { test } from "vitest";
 import { linearSrgbFromTemperature, temperatureFromBv } from "#app/astrometry/photometry.ts";
-import { checkAll, expectClose, readTable } from "./table.ts";
+import { checkAll, expectClose } from "./check.ts";
+import { readTable } from "./table.ts";
 
 type Temperature = { what: "temperature"; bv: number; kelvin: number };
 type Colour = { what: "colour"; kelvin: number; fitted: number[]; tabulated: number[] };

@@ -1,6 +1,7 @@
 import { expect, test } from "vitest";
 import { distancePosterior, type Prior } from "#app/astrometry/posterior.ts";
-import { checkAll, expectClose, readTable } from "./table.ts";
+import { checkAll, expectClose } from "./check.ts";
+import { readTable } from "./table.ts";
 
 interface Case {
   parallaxMas: number;

@@ -1,6 +1,7 @@
 import { test } from "vitest";
 import { parseDeclination, parseRightAscension } from "#app/astrometry/coordinates.ts";
-import { checkAll, expectClose, readTable } from "./table.ts";
+import { checkAll, expectClose } from "./check.ts";
+import { readTable } from "./table.ts";
 
 interface Case {
   kind: "ra" | "dec";

@@ -1,6 +1,7 @@
 import { expect, test } from "vitest";
 import { type AngleUnit, convertAngle, convertLength, type LengthUnit } from "#app/astrometry/units.ts";
-import { checkAll, expectClose, readTable } from "./table.ts";
+import { checkAll, expectClose } from "./check.ts";
+import { readTable } from "./table.ts";
 
 type Case = { what: string; value: number; expected: number } & (
   | { what: "length"; from: LengthUnit; to: LengthUnit }

@@ -1,4 +1,4 @@
-import { index, mysqlEnum, mysqlTable, primaryKey, uniqueIndex } from "drizzle-orm/mysql-core";
+import { bigint, index, int, mysqlEnum, mysqlTable, primaryKey, uniqueIndex, varchar } from "drizzle-orm/mysql-core";
 import { ROLES } from "#app/audit/actor.ts";
 import { createdAt, digest, exact, id, instant, ref, version, words } from "../columns.ts";
 import { LINK_PURPOSES, PERSON_STATES } from "../enums.ts";
@@ -76,3 +76,12 @@ export const oneTimeLink = mysqlTable(
     index("one_time_link_person").on(t.personId, t.purpose),
   ],
 );
+
+/** Kept by the rate limiter (people/limits.server.ts), which dictates its shape. */
+export const attemptLimit = mysqlTable("attempt_limit", {
+  /** "<rule>:<SHA-256 of account or address, shortened>" */
+  key: varchar("key", { length: 255 }).primaryKey(),
+  points: int("points").notNull().default(0),
+  /** Milliseconds since 1970. */
+  expire: bigint("expire", { mode: "number", unsigned: true }),
+});

@@ -1,0 +1,67 @@
+import { eq } from "drizzle-orm";
+import { ulid } from "ulid";
+import type { z } from "zod";
+import type { Actor } from "#app/audit/actor.ts";
+import { change } from "#app/audit/change.server.ts";
+import { db } from "#app/database/db.server.ts";
+import { person, personRole, session } from "#app/database/schema/people.ts";
+import { Invalid } from "#app/errors.ts";
+import type { SignIn } from "./input.ts";
+import { countAttempt, forgetAttempts } from "./limits.server.ts";
+import { passwordMatches } from "./password.server.ts";
+import { ABSOLUTE_MS } from "./session-limits.ts";
+import { newToken, tokenHash } from "./token.server.ts";
+
+export interface Visitor {
+  address: string;
+  userAgent: string;
+  requestId: string;
+}
+
+/** One sentence for a wrong address, a wrong password, an unanswered invitation and a closed account. */
+const REFUSED = "The address and the password do not fit together.";
+
+/**
+ * Public. Checks the password and opens a new session with a new token.
+ * @throws Invalid with the same words whatever is wrong, TooMany by account and by address
+ */
+export async function signIn(
+  input: z.output<typeof SignIn>,
+  visitor: Visitor,
+): Promise<{ token: string; expiresAt: Date }> {
+  await countAttempt("sign-in-address", visitor.address);
+  await countAttempt("sign-in-account", input.email);
+  const [found] = await db().select().from(person).where(eq(person.email, input.email));
+  const right = await passwordMatches(found?.passwordHash, input.password);
+  if (!found || !right || found.state !== "active") throw new Invalid({ "": [REFUSED] });
+  await forgetAttempts("sign-in-account", input.email);
+  const roles = await db().select().from(personRole).where(eq(personRole.personId, found.id));
+  const actor: Actor = {
+    personId: found.id,
+    name: found.name,
+    email: found.email,
+    roles: roles.map((row) => row.role),
+    sessionId: null,
+    requestId: visitor.requestId,
+  };
+  return openSession(actor, visitor);
+}
+
+async function openSession(actor: Actor, visitor: Visitor): Promise<{ token: string; expiresAt: Date }> {
+  const token = newToken();
+  const now = new Date();
+  const expiresAt = new Date(now.getTime() + ABSOLUTE_MS);
+  await change(actor, "people.sign-in", async (c) => {
+    await c.tx.insert(session).values({
+      id: ulid(),
+      tokenHash: tokenHash(token),
+      personId: actor.personId,
+      lastSeenAt: now,
+      expiresAt,
+      address: visitor.address.slice(0, 64),
+      userAgent: visitor.userAgent.slice(0, 400),
+    });
+    c.audit({ objectType: "person", objectId: actor.personId, objectName: actor.name, note: "Signed in" });
+  });
+  return { token, expiresAt };
+}

@@ -6,6 +6,9 @@ interface Panel {
   from: number;
   to: number;
   mass: number;
+  /** The density at either end. */
+  atFrom: number;
+  atTo: number;
 }
 
 /** The panels in ascending order, with gaps where nothing is to be found. */
@@ -25,11 +28,13 @@ export interface Stretch {
 /** What lies this many nats below the highest peak is left out: exp(-40) is 4e-18. */
 export const DEPTH = 40;
 /** Below this depth a panel's own error no longer shows. */
-const SHALLOW = 28;
+const SHALLOW = 26;
 /** Longest panel in ln r, and greatest change of the log density across half of it, for sixteen nodes. */
-const LONGEST = 1.6;
-const STEEPEST = 5;
+const LONGEST = 2;
+const STEEPEST = 7;
 
+/** A step of Newton's, in panels, after which no other is needed. */
+const CLOSE = 1e-5;
 /** For a panel, and for a step of an eighth of one or less. */
 const PANEL_RULE = gaussLegendre(16);
 const STEP_RULE = gaussLegendre(8);
@@ -80,7 +85,8 @@ export function probabilityMass(log: AnchoredDensity, stretches: Stretch[], peak
     const steepness = Math.max(Math.abs(logFrom - logMiddle), Math.abs(logTo - logMiddle));
     const tame = to - from <= LONGEST && steepness <= STEEPEST;
     if (negligible || tame || middle <= from || middle >= to) {
-      panels.push({ from, to, mass: integrate(density, from, to, PANEL_RULE) });
+      const mass = integrate(density, from, to, PANEL_RULE);
+      panels.push({ from, to, mass, atFrom: Math.exp(logFrom - peak), atTo: Math.exp(logTo - peak) });
       return;
     }
     divide(from, logFrom, middle, logMiddle);
@@ -102,19 +108,39 @@ export function shareBelow(mass: Mass, v: number): number {
   return mass.panels.reduce((sum, panel) => (panel.to <= v ? sum + panel.mass : sum), 0) / mass.total;
 }
 
+/**
+ * First guess, 0 to 1 along a panel, of the place below which a share of its mass lies: on the cubic that has the
+ * panel's mass and the density at its ends.
+ */
+function guess({ from, to, mass, atFrom, atTo }: Panel, share: number): number {
+  const [start, end] = [(atFrom * (to - from)) / mass, (atTo * (to - from)) / mass];
+  let [low, high, at] = [0, 1, share];
+  for (let turn = 0; turn < 5; turn++) {
+    const below = at * (start + at * (3 - 2 * start - end + at * (start + end - 2)));
+    if (below < share) low = at;
+    else high = at;
+    const slope = start + at * (2 * (3 - 2 * start - end) + 3 * at * (start + end - 2));
+    const next = at + (share - below) / slope;
+    at = next > low && next < high ? next : (low + high) / 2;
+  }
+  return at;
+}
+
 /** Newton's method for the place in a panel below which the wanted mass lies; halves where Newton leaves the panel. */
-function solve({ from, to, mass }: Panel, density: Mass["density"], wanted: number): number {
-  const tolerance = 1e-13 * (to - from);
+function solve(panel: Panel, density: Mass["density"], wanted: number): number {
+  const { from, to, mass } = panel;
   let [low, high] = [from, to];
-  let v = from + (to - from) * (wanted / mass);
+  let v = from + (to - from) * guess(panel, wanted / mass);
   let below = integrate(density, from, v, PANEL_RULE);
   for (let turn = 0; turn < 100; turn++) {
     if (below < wanted) low = v;
     else high = v;
     const newton = v + (wanted - below) / density(v);
     const next = newton >= low && newton <= high ? newton : (low + high) / 2;
-    if (Math.abs(next - v) <= tolerance) return next;
-    below += integrate(density, v, next, Math.abs(next - v) <= (to - from) / 8 ? STEP_RULE : PANEL_RULE);
+    const step = Math.abs(next - v) / (to - from);
+    // What is left after a step of Newton's goes as the square of that step.
+    if (next === v || (next === newton && step <= CLOSE)) return next;
+    below += integrate(density, v, next, step <= 1 / 8 ? STEP_RULE : PANEL_RULE);
     v = next;
   }
   return v;

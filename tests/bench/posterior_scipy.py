@@ -28,13 +28,13 @@ def quantiles(parallax, error, length_pc):
     while log(high) > peak - 30:
         high, step = high + step, step * 1.5
     density = lambda u: math.exp(log(u) - peak)
-    total = quad(density, low, high, points=peaks, epsrel=1e-8, limit=200)[0]
+    total = quad(density, low, high, points=peaks, limit=200)[0]
 
     def beyond(u, probability):
         inside = [p for p in peaks if p < u] or None
-        return quad(density, low, u, points=inside, epsrel=1e-8, limit=200)[0] - probability * total
+        return quad(density, low, u, points=inside, limit=200)[0] - probability * total
 
-    return [math.exp(brentq(beyond, low, high, args=(q,), xtol=1e-8)) for q in (0.05, 0.16, 0.5, 0.84, 0.95)]
+    return [math.exp(brentq(beyond, low, high, args=(q,))) for q in (0.05, 0.16, 0.5, 0.84, 0.95)]
 
 
 inputs = json.load(sys.stdin)

@@ -11,7 +11,7 @@ interface Case {
   peaks: { distancePc: number; depth: number }[];
 }
 
-// scipy integrates to 1e-9 or better and solves to 1e-13, the quadrature here to about 1e-12; a quantile that falls in the dip
+// scipy integrates to 1e-9 or better and solves to 1e-13, the quadrature here to about 1e-9; a quantile that falls in the dip
 // between two peaks, or a limit a hair inside a narrow peak, multiplies either error. 1e-6 covers all of that and is
 // a thousandth of what the best parallaxes can show. A peak is flat on top: a minimiser finds it to about 1e-8.
 const TOLERANCE = 1e-6;

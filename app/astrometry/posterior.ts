@@ -71,8 +71,8 @@ interface Peaks {
 }
 
 /**
- * Peaks of the density in r (not in ln r). The limit is one where the density still rises there, unless that rise
- * ends more than DEPTH nats below the other peak, where no probability is left.
+ * Peaks of the density in r (not in ln r). The limit is one where the density still rises there, unless, counted in
+ * ln r, that rise ends more than DEPTH nats below the other peak: no probability is left there, nor is it integrated.
  */
 function peaksOf(shape: Shape, log: AnchoredDensity, along: (x: number) => number, end: number): Peaks {
   const height = (v: number) => log.at(v) - v;
@@ -81,7 +81,7 @@ function peaksOf(shape: Shape, log: AnchoredDensity, along: (x: number) => numbe
     .map(along);
   const tops = turns.filter((_, i) => i % 2 === 0);
   const risesAtEnd = turns.length % 2 === 0;
-  const shows = tops.every((v) => height(end) >= height(v) - DEPTH);
+  const shows = tops.every((v) => log.at(end) >= log.at(v) - DEPTH);
   if (risesAtEnd && shows) tops.push(end);
   const highest = tops.reduce((best, v) => (height(v) > height(best) ? v : best));
   return { tops, dip: tops.length > 1 ? turns[1]! : null, highest };

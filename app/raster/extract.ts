@@ -24,13 +24,14 @@ export interface Extracted {
   /** Lines and points in the order they are painted. */
   drawn: Object3D[];
   labelled: Object3D[];
+  marked: Object3D[];
   /** Groups in screen pixels: see userData.screen. */
   screens: Object3D[];
 }
 
 /** The visible objects of a scene in render order. A group with userData.screen is kept whole, for later. */
 export function extract(scene: Scene): Extracted {
-  const found: Extracted = { drawn: [], labelled: [], screens: [] };
+  const found: Extracted = { drawn: [], labelled: [], marked: [], screens: [] };
   gather(scene, found);
   found.drawn.sort((a, b) => a.renderOrder - b.renderOrder);
   return found;
@@ -44,6 +45,7 @@ function gather(object: Object3D, found: Extracted): void {
   }
   if (isLine(object) || isPoints(object)) found.drawn.push(object);
   if (object.userData.label) found.labelled.push(object);
+  if (object.userData.marker) found.marked.push(object);
   for (const child of object.children) gather(child, found);
 }
 

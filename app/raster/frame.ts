@@ -5,6 +5,7 @@ import type { Fonts } from "./font.ts";
 import { type LabelToPlace, labelRequests } from "./label-requests.ts";
 import { createMask, type Mask } from "./mask.ts";
 import { paintLabel } from "./paint-label.ts";
+import { paintMarker } from "./paint-marker.ts";
 import { type Canvas, paintObject, projectPoints } from "./paint-objects.ts";
 import { paintScreen } from "./paint-screen.ts";
 import { placeLabels, type Rectangle } from "./place-labels.ts";
@@ -62,8 +63,9 @@ export function renderFrame(scene: Scene, camera: Camera, options: FrameOptions)
   camera.updateMatrixWorld();
   const canvas: Canvas = { ...memory, projector: projectorOf(camera, width, height), pixelRatio };
   beginFrame(memory.surface);
-  const { drawn, labelled, screens } = extract(scene);
+  const { drawn, labelled, marked, screens } = extract(scene);
   for (const object of drawn) paintObject(canvas, object);
+  for (const object of marked) paintMarker(canvas, object);
   const taken = fonts ? screens.flatMap((screen) => paintScreen(canvas, screen, fonts)) : [];
   const labels = fonts ? paintLabels(canvas, labelled, fonts, [...keepOut, ...taken, ...starCores(canvas, drawn)]) : [];
   resolveFrame(memory.surface);

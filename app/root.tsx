@@ -3,13 +3,14 @@ import { Links, Meta, Outlet, Scripts, ScrollRestoration, useMatches, useRouteLo
 import type { Route } from "./+types/root";
 import "./app.css";
 import { hardenResponses, refuseForeignOrigins } from "./http.server.ts";
+import { findSession } from "./people/find-session.server.ts";
 import { errorTitle, RouteError } from "./routes/RouteError.tsx";
 import { NonceContext } from "./ui/nonce-context.ts";
 import { pageFacts } from "./ui/page-handle.ts";
 import { SkipLink } from "./ui/SkipLink.tsx";
 import { themeFromCookie } from "./ui/theme-choice.ts";
 
-export const middleware: Route.MiddlewareFunction[] = [hardenResponses, refuseForeignOrigins];
+export const middleware: Route.MiddlewareFunction[] = [hardenResponses, refuseForeignOrigins, findSession];
 
 export const links: Route.LinksFunction = () => [{ rel: "icon", href: "/favicon.svg", type: "image/svg+xml" }];
 

@@ -1,7 +1,8 @@
-import { index, layout, prefix, type RouteConfig, route } from "@react-router/dev/routes";
+import { index, layout, type RouteConfig, route } from "@react-router/dev/routes";
 
 /** The map of the house: every address, in the order a person meets them. */
 export default [
+  index("routes/home.ts"),
   // -- the office: signed-in people (routes/office.tsx checks who enters) --
   layout("routes/office.tsx", [
     // desk
@@ -9,11 +10,26 @@ export default [
     // exhibits, media
     // reviews, editions, kiosks
     // people, audit, mail, account, pattern book
+    route("people", "routes/people/people.tsx"),
+    route("people/:person", "routes/people/person.tsx"),
+    route("audit", "routes/audit/audit.tsx"),
+    route("mail", "routes/mail/mails.tsx"),
+    route("mail/:mail", "routes/mail/mail.tsx"),
+    route("account", "routes/account/account.tsx"),
     route("pattern-book", "routes/pattern-book.tsx"),
   ]),
   route("theme", "routes/theme.ts"),
   // -- signing in --
+  route("sign-in", "routes/account/sign-in.tsx"),
+  route("sign-out", "routes/account/sign-out.ts"),
+  route("forgot-password", "routes/account/forgot-password.tsx"),
+  route("reset-password/:token", "routes/account/reset-password.tsx"),
+  route("invitation/:token", "routes/account/invitation.tsx"),
   // -- api --
+  route("api/*", "routes/api/not-found.ts"),
   // -- feeds, pictures, kiosks: anybody --
+  route("feed/:exhibit.json", "routes/feed/feed.ts"),
+  route("stills/:digest.png", "routes/feed/still.ts"),
   // -- health --
+  route("*", "routes/not-found.tsx"),
 ] satisfies RouteConfig;

@@ -1,0 +1,31 @@
+import { redirect } from "react-router";
+import { answered, answeredAction, readForm } from "#app/http.server.ts";
+import { parseInput } from "#app/parse-input.ts";
+import { acceptInvitation } from "#app/people/choose-password.server.ts";
+import { ChoosePassword } from "#app/people/input.ts";
+import { readLink } from "#app/people/one-time-link.server.ts";
+import type { Route } from "./+types/invitation";
+import { Gate } from "./Gate.tsx";
+import { PasswordForm } from "./PasswordForm.tsx";
+
+export const meta: Route.MetaFunction = () => [
+  { title: "Welcome · Alidade" },
+  // The address holds a secret: it is not told to other places. (Our own origin check needs the Origin header.)
+  { name: "referrer", content: "same-origin" },
+];
+
+export const loader = answered(({ params }: Route.LoaderArgs) => readLink(params.token, "invitation"));
+
+export const action = answeredAction(async ({ request, params }: Route.ActionArgs) => {
+  const { password, again } = Object.fromEntries(await readForm(request));
+  await acceptInvitation(parseInput(ChoosePassword, { token: params.token, password, again }));
+  return redirect("/sign-in?said=password-chosen");
+});
+
+export default function Invitation({ loaderData, actionData }: Route.ComponentProps) {
+  return (
+    <Gate title="Welcome" lead={`${loaderData.name}, choose the password for your account.`}>
+      <PasswordForm email={loaderData.email} actionData={actionData} />
+    </Gate>
+  );
+}

@@ -1,0 +1,6 @@
+/** Where to go after signing in: a path of our own, or the desk. Whatever could lead elsewhere is not followed. */
+export function ownPath(to: string | null): string {
+  if (!to?.startsWith("/") || to.startsWith("//") || to.includes("\\")) return "/desk";
+  const url = new URL(to, "http://own.invalid");
+  return url.origin === "http://own.invalid" ? url.pathname + url.search : "/desk";
+}

@@ -1,0 +1,16 @@
+import { redirect } from "react-router";
+import { actorContext } from "#app/context.server.ts";
+import { clearSessionToken } from "#app/people/session-cookie.server.ts";
+import { signOut } from "#app/people/sign-out.server.ts";
+import type { Route } from "./+types/sign-out";
+
+/** Looking at the address signs nobody out. */
+export function loader() {
+  return redirect("/desk");
+}
+
+export async function action({ context }: Route.ActionArgs) {
+  const actor = context.get(actorContext);
+  if (actor) await signOut(actor);
+  return redirect("/sign-in?said=signed-out", { headers: { "Set-Cookie": await clearSessionToken() } });
+}

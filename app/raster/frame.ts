@@ -74,8 +74,9 @@ export function renderFrame(scene: Scene, camera: Camera, options: FrameOptions)
 
 function paintLabels(canvas: Canvas, objects: Object3D[], fonts: Fonts, keepOut: Rectangle[]): PlacedLabel[] {
   const requests: LabelToPlace[] = labelRequests(objects, canvas.projector, fonts, canvas.pixelRatio);
-  return placeLabels(requests, canvas.surface, keepOut).map(({ request, ...box }) => {
-    paintLabel(canvas, fonts, request, box.left, box.top);
+  return placeLabels(requests, canvas.surface, keepOut).map(({ request, isReduced, ...box }) => {
+    const { label, size, subSize } = request;
+    paintLabel(canvas, fonts, { label: isReduced ? { ...label, sub: "" } : label, size, subSize }, box.left, box.top);
     return { object: request.object, text: request.label.text, ...box };
   });
 }

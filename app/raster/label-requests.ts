@@ -15,7 +15,7 @@ export interface LabelToPlace extends LabelRequest {
 
 /** The second line against the first, and the height of a line against its letters. */
 const SUB = 0.8;
-const LINE = 1.25;
+export const LINE = 1.25;
 
 export function measureLabel(label: LabelData, fonts: Fonts, pixelRatio: number) {
   const size = label.sizePx * pixelRatio;
@@ -42,7 +42,8 @@ export function labelRequests(
     const [x, y] = place;
     const offset = label.offsetPx * pixelRatio;
     const measured = measureLabel(label, fonts, pixelRatio);
-    requests.push({ object, label, x, y, offset, priority: label.priority, ...measured });
+    const reduced = label.sub ? measureLabel({ ...label, sub: "" }, fonts, pixelRatio) : undefined;
+    requests.push({ object, label, x, y, offset, priority: label.priority, reduced, ...measured });
   }
   return requests;
 }

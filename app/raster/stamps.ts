@@ -2,7 +2,7 @@
 export const PHASES = 4;
 const SIZE_STEPS = 4;
 /** The light ends at so many times the star's size. */
-const REACH = 5;
+const REACH = 6;
 
 /** The light of one star of a size at one place inside its pixel: `side` by `side` values around `middle`. */
 export interface Stamp {
@@ -33,10 +33,10 @@ export function stampOf(sizePx: number, phaseX: number, phaseY: number): Stamp {
 function profile(radius: number, size: number): number {
   const r = radius / size;
   if (r >= REACH) return 0;
-  const core = 2.2 * Math.exp(-3.2 * r * r);
-  const shoulder = 0.16 * Math.exp(-0.9 * r * r);
+  const core = 3 * Math.exp(-2.6 * r * r);
+  const shoulder = 0.22 * Math.exp(-0.6 * r * r);
   const fade = 1 - r / REACH;
-  return core + shoulder + 0.035 * fade * fade;
+  return core + shoulder + 0.06 * fade * fade;
 }
 
 /** All stamps of one size carry the same flux: a star must not flicker while it moves through a pixel. */

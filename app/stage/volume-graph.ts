@@ -59,6 +59,7 @@ function sunLabel({ sun }: VolumeLayout): Object3D {
 function cast(stars: readonly LaidStar[]): Object3D {
   const points = lights(stars);
   points.name = CAST;
+  points.userData.pick = true;
   points.userData.recordIds = stars.map(({ recordId }) => recordId);
   return points;
 }

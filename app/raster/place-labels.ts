@@ -42,36 +42,49 @@ export function overlaps(a: Rectangle, b: Rectangle): boolean {
   return a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom;
 }
 
+interface Size {
+  width: number;
+  height: number;
+}
+
 /**
- * Finds a place beside its point for each label, most important first, at one of eight anchors. A label that fits at none
- * is tried in its smaller form, then left out. No two placed labels overlap, none overlaps `keepOut`, all lie inside the frame.
+ * Finds a place beside its point for each label, most important first, at one of eight anchors. Smaller forms are placed
+ * first, so that as many points as can be have their name; then those with room around them grow to the whole. A label
+ * that fits at no anchor is left out. No two placed labels overlap, none overlaps `keepOut`, all lie inside the frame, and
+ * none is nearer to the point of another label than to its own: it would be read as the other's.
  */
 export function placeLabels<T extends LabelRequest>(
   requests: readonly T[],
   frame: Size,
   keepOut: readonly Rectangle[] = [],
 ): LabelPlace<T>[] {
-  const taken: Rectangle[] = [...keepOut];
+  const ordered = [...requests].sort((a, b) => b.priority - a.priority);
   const places: LabelPlace<T>[] = [];
-  for (const request of [...requests].sort((a, b) => b.priority - a.priority)) {
-    const whole = freePlace(request, request, frame, taken);
-    const place = whole ?? (request.reduced && freePlace(request, request.reduced, frame, taken));
-    if (!place) continue;
-    taken.push(place);
-    places.push({ request, isReduced: !whole, ...place });
+  const find = (request: T, size: Size, others: readonly Rectangle[]) =>
+    ANCHORS.map((anchor) => at(request, size, anchor)).find(
+      (box) =>
+        inside(box, frame) &&
+        ![...keepOut, ...others].some((other) => overlaps(box, other)) &&
+        !requests.some((rival) => squareTo(box, rival) < squareTo(box, request)),
+    );
+  for (const request of ordered) {
+    const place = find(request, request.reduced ?? request, places);
+    if (place) places.push({ request, isReduced: Boolean(request.reduced), ...place });
+  }
+  for (const [index, place] of places.entries()) {
+    if (!place.isReduced) continue;
+    const others = places.filter((other) => other !== place);
+    const whole = find(place.request, place.request, others);
+    if (whole) places[index] = { request: place.request, isReduced: false, ...whole };
   }
   return places;
 }
 
-interface Size {
-  width: number;
-  height: number;
-}
-
-function freePlace(request: LabelRequest, size: Size, frame: Size, taken: readonly Rectangle[]): Rectangle | undefined {
-  return ANCHORS.map((anchor) => at(request, size, anchor)).find(
-    (box) => inside(box, frame) && !taken.some((other) => overlaps(box, other)),
-  );
+/** The square of the distance from a box to a label's point. */
+function squareTo(box: Rectangle, { x, y }: LabelRequest): number {
+  const dx = Math.max(box.left - x, 0, x - box.right);
+  const dy = Math.max(box.top - y, 0, y - box.bottom);
+  return dx * dx + dy * dy;
 }
 
 function at({ x, y, offset }: LabelRequest, { width, height }: Size, anchor: (typeof ANCHORS)[number]): Rectangle {

@@ -1,13 +1,20 @@
 import { z } from "zod";
 
+/** A form sends numbers as text. What is empty, or no number at all, is refused at its field, not taken for zero. */
+const asNumber = (value: unknown) => (typeof value === "string" && value.trim() !== "" ? Number(value) : value);
+const numberBetween = (least: number, most: number) => {
+  const within = z.number("Enter a number.").min(least, `At least ${least}.`).max(most, `At most ${most}.`);
+  return z.preprocess(asNumber, within);
+};
+
 /** Where the visitor stands at the start. Angles in degrees; distance 1 just fits the cast. */
 export const Camera = z.strictObject({
   /** Around the Galactic pole, 0 looking along -X. */
-  azimuthDeg: z.coerce.number().min(-360).max(360).default(-60),
+  azimuthDeg: numberBetween(-360, 360).default(-60),
   /** Above the Galactic plane. */
-  elevationDeg: z.coerce.number().min(-89, "At least -89 degrees.").max(89, "At most 89 degrees.").default(24),
-  distance: z.coerce.number().min(0.2, "At least 0.2.").max(10, "At most 10.").default(1),
-  fovDeg: z.coerce.number().min(10).max(90).default(40),
+  elevationDeg: numberBetween(-89, 89).default(24),
+  distance: numberBetween(0.2, 10).default(1),
+  fovDeg: numberBetween(10, 90).default(40),
 });
 
 /**

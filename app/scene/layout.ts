@@ -3,14 +3,16 @@ import { convertLength } from "#app/astrometry/units.ts";
 import type { Language } from "#app/figures/language.ts";
 import { distanceFigure } from "#app/figures/range-figure.ts";
 import { scaleSymbolText, scaleText } from "#app/figures/scale-text.ts";
-import { claimsOf, type SceneClaims } from "./claims.ts";
+import { claimsOf, type SceneClaims, stretchText } from "./claims.ts";
+import { uncertainOrder } from "./depth-order.ts";
 import type { SceneDocument } from "./document.ts";
-import type { SceneMember } from "./member.ts";
+import type { CastMember, SceneMember } from "./member.ts";
+import { type MissingMember, partCast } from "./missing.ts";
 import { type RadialScale, radiusOf, scaleFor } from "./radial-scale.ts";
-import { decadeLengths, evenLengths, roundLengthBelow } from "./round-lengths.ts";
+import { evenLengths, roundLengthBelow, stretchedLengths } from "./round-lengths.ts";
 import { type Rgb, starColour, starSizePx } from "./star-look.ts";
 
-export type { SceneMember } from "./member.ts";
+export type { CastMember, SceneMember } from "./member.ts";
 export type Point = [x: number, y: number, z: number];
 
 export interface LaidStar {
@@ -33,36 +35,46 @@ export interface LaidStar {
 export interface VolumeLayout {
   stars: LaidStar[];
   sun: { name: string; colour: Rgb; sizePx: number };
-  /** Circles around the Sun in the Galactic plane. */
+  /** Circles around the Sun in the Galactic plane, from the inside out. */
   rings: { radius: number; label: string }[];
   /** A round length near the Sun; null where the scale is not linear. */
   scaleBar: { length: number; label: string } | null;
+  /** What stands in place of the bar where the scale is not linear; null where it is. */
+  stretchText: string | null;
   /** Radius of the cast, scene units: the camera's distance is counted in it. */
   extent: number;
-  claims: SceneClaims;
+  /** `uncertainOrder`: pairs of names whose order of distance the ranges leave open. */
+  claims: SceneClaims & { uncertainOrder: [string, string][] };
+  /** Those of the cast that have no place, and why. */
+  missing: MissingMember[];
 }
 
 const SUN: Record<Language, string> = { en: "Sun", fr: "Soleil" };
 
-/** The far end of a range may lie at infinity; it is drawn to this many times the value. */
-const FARTHEST = 4;
+/** Radius of a scene with nobody in it, pc. */
+const EMPTY_PC = 1;
 
-/**
- * Places a cast around the Sun.
- * @param members every one with a finite distance above zero
- * @throws RangeError when a distance is not
- */
-export function layoutVolume(document: SceneDocument, members: SceneMember[], language: Language = "en"): VolumeLayout {
-  const distances = members.map((member) => member.distancePc.value);
+/** Places a cast around the Sun. Those who cannot be placed are in `missing`, with the reason. */
+export function layoutVolume(
+  document: SceneDocument,
+  members: readonly CastMember[],
+  language: Language = "en",
+): VolumeLayout {
+  const { placed, missing } = partCast(members, language);
+  const distances = placed.map((member) => member.distancePc.value);
   const scale = scaleFor(document.mapping, distances);
-  const farthest = Math.max(...distances, 1e-6);
+  const farthest = distances.reduce((most, pc) => Math.max(most, pc), 0) || EMPTY_PC;
+  const { rings, ringRatio } = ringsOf(document, scale, distances, language);
+  const isLinear = document.mapping === "linear";
   return {
-    stars: members.map((member) => placeStar(document, scale, member, language)),
+    stars: placed.map((member) => placeStar(document, scale, member, language)),
     sun: { name: SUN[language], colour: starColour(null), sizePx: 3 },
-    rings: document.rings === "none" ? [] : ringsOf(document, scale, distances, language),
-    scaleBar: document.mapping === "linear" ? scaleBarOf(document, farthest, language) : null,
+    rings,
+    scaleBar: isLinear ? scaleBarOf(document, farthest, language) : null,
+    stretchText: isLinear ? null : stretchText(ringRatio, language),
     extent: radiusOf(scale, farthest),
-    claims: claimsOf(document),
+    claims: { ...claimsOf(document), uncertainOrder: uncertainOrder(placed) },
+    missing,
   };
 }
 
@@ -76,8 +88,8 @@ function placeStar(document: SceneDocument, scale: RadialScale, member: SceneMem
     recordId: member.recordId,
     name: member.name,
     position: place(value),
-    low: place(Math.max(low, 0)),
-    high: place(Math.min(high, value * FARTHEST)),
+    low: place(low),
+    high: place(high),
     colour: starColour(member.bv),
     sizePx: starSizePx(member.vMag),
     label: document.labels && member.labelled ? member.name : "",
@@ -94,15 +106,18 @@ function distanceText(document: SceneDocument, member: SceneMember, language: La
 }
 
 function ringsOf(document: SceneDocument, scale: RadialScale, distancesPc: number[], language: Language) {
-  if (distancesPc.length === 0) return [];
+  if (document.rings === "none" || distancesPc.length === 0) return { rings: [], ringRatio: null };
   const { unit } = document;
-  const nearest = convertLength(Math.min(...distancesPc), "pc", unit);
-  const farthest = convertLength(Math.max(...distancesPc), "pc", unit);
-  const lengths = document.mapping === "linear" ? evenLengths(farthest) : decadeLengths(nearest, farthest);
-  return lengths.map((length) => ({
+  const nearest = distancesPc.reduce((least, pc) => Math.min(least, pc));
+  const farthest = distancesPc.reduce((most, pc) => Math.max(most, pc));
+  const [least, most] = [convertLength(nearest, "pc", unit), convertLength(farthest, "pc", unit)];
+  const { lengths, ratio } =
+    document.mapping === "linear" ? { lengths: evenLengths(most), ratio: null } : stretchedLengths(least, most);
+  const rings = lengths.map((length) => ({
     radius: radiusOf(scale, convertLength(length, unit, "pc")),
     label: scaleSymbolText(length, unit, language),
   }));
+  return { rings, ringRatio: ratio };
 }
 
 function scaleBarOf(document: SceneDocument, farthestPc: number, language: Language) {

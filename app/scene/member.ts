@@ -8,7 +8,7 @@ export interface SceneMember {
   /** ICRS, degrees. */
   raDeg: number;
   decDeg: number;
-  /** 68 % range, pc; high may be Infinity. */
+  /** 68 % range, pc, 0 <= low < value < high, finite. */
   distancePc: RangeNumbers;
   regime: Regime;
   /** Colour index B-V and magnitude V, mag; null where nothing is kept. */
@@ -16,4 +16,12 @@ export interface SceneMember {
   vMag: number | null;
   /** Whether its name stands in the picture. */
   labelled: boolean;
+}
+
+/** One of the cast as it is kept: without a position or a distance it cannot be placed. */
+export interface CastMember extends Omit<SceneMember, "raDeg" | "decDeg" | "distancePc" | "regime"> {
+  raDeg: number | null;
+  decDeg: number | null;
+  distancePc: RangeNumbers | null;
+  regime: Regime | null;
 }

@@ -23,7 +23,7 @@ export function distanceAt({ mapping, corePc }: RadialScale, radius: number): nu
 }
 
 /** A scale for a cast: the log core is a third of the nearest distance, so that every member stands beyond it. */
-export function scaleFor(mapping: "linear" | "log", distancesPc: number[]): RadialScale {
-  const nearest = Math.min(...distancesPc.filter((distance) => distance > 0));
+export function scaleFor(mapping: "linear" | "log", distancesPc: readonly number[]): RadialScale {
+  const nearest = distancesPc.reduce((least, pc) => (pc > 0 && pc < least ? pc : least), Number.POSITIVE_INFINITY);
   return { mapping, corePc: mapping === "log" && Number.isFinite(nearest) ? nearest / 3 : 1 };
 }

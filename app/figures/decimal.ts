@@ -23,7 +23,7 @@ export function parseDecimal(text: string): Decimal {
   return { digits: sign && sign !== "+" ? -digits : digits, scale };
 }
 
-/** The shortest decimal text that is this double, without an exponent. @throws RangeError when it is not finite */
+/** The shortest decimal number that reads back as this double: 0.1 is 0.1. @throws RangeError when it is not finite */
 export function decimalOf(value: number): Decimal {
   if (!Number.isFinite(value)) throw new RangeError(`${value} is not a finite number`);
   return parseDecimal(String(value));
@@ -60,7 +60,32 @@ export function subtractDecimals(a: Decimal, b: Decimal): Decimal {
   return { digits: roundToScale(a, scale).digits - roundToScale(b, scale).digits, scale };
 }
 
-/** How many digits stand before the rounding place's zeros: 3 for 103, 3 for 0.00103. 0 for zero. */
+/** How many digits there are from the first that is not zero: 3 for 103, 3 for 0.00103, 4 for 10.30. 0 for zero. */
 export function significantLength({ digits }: Decimal): number {
   return digits === 0n ? 0 : (digits < 0n ? -digits : digits).toString().length;
+}
+
+/** Exact multiplication by a whole number: degrees to seconds of arc. */
+export function timesWhole({ digits, scale }: Decimal, factor: bigint): Decimal {
+  return { digits: digits * factor, scale };
+}
+
+/** Exact multiplication by a power of ten: only the place moves. */
+export function timesTenTo({ digits, scale }: Decimal, power: number): Decimal {
+  return { digits, scale: scale - power };
+}
+
+/** Rounds to so many leading digits, again after a carry: 99.96 to three is 100, not 100.0. Zero is plain 0. */
+export function toSignificant(value: Decimal, count: number): Decimal {
+  if (value.digits === 0n) return { digits: 0n, scale: 0 };
+  const rounded = roundToScale(value, value.scale - significantLength(value) + count);
+  if (significantLength(rounded) === count) return rounded;
+  return roundToScale(rounded, rounded.scale - 1);
+}
+
+/** The whole number at or below: -0.5 is -1. */
+export function floorDecimal({ digits, scale }: Decimal): bigint {
+  if (scale <= 0) return digits * tenTo(-scale);
+  const quotient = digits / tenTo(scale);
+  return digits < 0n && digits % tenTo(scale) !== 0n ? quotient - 1n : quotient;
 }

@@ -32,7 +32,7 @@ export function shownDigits(plain: string, language: Language): string {
 export function parseShown(shown: string, language: Language): string {
   const { point, group } = MARKS[language];
   const plain = shown.replace(MINUS, "-").replaceAll(group, "").replace(point, ".");
-  if (!/^-?\d+(\.\d+)?$/.test(plain) || shownDigits(plain, language) !== shown) {
+  if (!/^-?(0|[1-9]\d*)(\.\d+)?$/.test(plain) || shownDigits(plain, language) !== shown) {
     throw new RangeError(`"${shown}" is not a number as it is shown in ${language}`);
   }
   return plain;

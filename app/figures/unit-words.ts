@@ -28,7 +28,8 @@ const WORDS: Record<Language, Record<WordedUnit, Forms>> = {
  * @param plain the shown number in plain decimal text
  */
 export function unitWord(plain: string, unit: WordedUnit, language: Language): string {
-  const decimals = plain.split(".")[1]?.length ?? 0;
+  // Plural rules look no further than whether there are decimals; twenty is the most that every engine takes.
+  const decimals = Math.min(plain.split(".")[1]?.length ?? 0, 20);
   const rules = new Intl.PluralRules(language, { minimumFractionDigits: decimals, maximumFractionDigits: decimals });
   const form = rules.select(Math.abs(Number(plain))) === "one" ? "one" : "other";
   return WORDS[language][unit][form];

@@ -31,7 +31,8 @@ export function pixelsPerUnitAtSun(camera: PerspectiveCamera, heightPx: number):
 
 /**
  * Puts the bar of this view into the scene, bottom right, in place of an earlier one: a round length that fits, and what
- * the scene may claim. Where the scale is not linear, or the Sun is behind the eye, there is no bar, only the claim.
+ * the scene may claim. Where the scale is not linear, how it stretches stands in the bar's place; where the Sun is behind
+ * the eye, the claim stands alone.
  */
 export function putScaleBar(scene: Scene, view: View): void {
   const old = scene.getObjectByName(NAME);
@@ -41,7 +42,8 @@ export function putScaleBar(scene: Scene, view: View): void {
   group.userData.screen = "bottom-right";
   const claim = claimsSentence(view.layout.claims, view.language);
   const bar = view.layout.scaleBar && barOf(view);
-  group.add(caption(bar ? [bar.text, claim] : [claim]));
+  const scale = bar ? bar.text : view.layout.stretchText;
+  group.add(caption(scale ? [scale, claim] : [claim]));
   if (bar) {
     const [left, right, y] = [-MARGIN_PX - bar.lengthPx, -MARGIN_PX, -MARGIN_PX - 52];
     const ends = [left, y, 0, right, y, 0, left, y - 5, 0, left, y + 5, 0, right, y - 5, 0, right, y + 5, 0];

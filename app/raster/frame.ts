@@ -72,13 +72,18 @@ export function renderFrame(scene: Scene, camera: Camera, options: FrameOptions)
   return { data: memory.surface.bytes, width, height, labels, memory };
 }
 
+/** Room between two labels side by side, px before the pixel ratio. */
+const GAP_PX = 6;
+
 function paintLabels(canvas: Canvas, objects: Object3D[], fonts: Fonts, keepOut: Rectangle[]): PlacedLabel[] {
   const requests: LabelToPlace[] = labelRequests(objects, canvas.projector, fonts, canvas.pixelRatio);
-  return placeLabels(requests, canvas.surface, keepOut).map(({ request, isReduced, ...box }) => {
-    const { label, size, subSize } = request;
-    paintLabel(canvas, fonts, { label: isReduced ? { ...label, sub: "" } : label, size, subSize }, box.left, box.top);
-    return { object: request.object, text: request.label.text, ...box };
-  });
+  return placeLabels(requests, canvas.surface, keepOut, GAP_PX * canvas.pixelRatio).map(
+    ({ request, isReduced, ...box }) => {
+      const { label, size, subSize } = request;
+      paintLabel(canvas, fonts, { label: isReduced ? { ...label, sub: "" } : label, size, subSize }, box.left, box.top);
+      return { object: request.object, text: request.label.text, ...box };
+    },
+  );
 }
 
 /** Names never cover a star. Only of points that say so (userData.keepOut): a background of thousands leaves no room. */

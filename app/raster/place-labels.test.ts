@@ -22,13 +22,17 @@ const withReduced = fc.tuple(request, fc.boolean()).map(([whole, has]) => ({
 
 test("placed labels never overlap, keep out of what they must, and lie inside the frame", () => {
   fc.assert(
-    fc.property(fc.array(withReduced, { maxLength: 30 }), fc.array(rectangle, { maxLength: 4 }), (requests, keepOut) => {
-      const places = placeLabels(requests, frame, keepOut);
-      for (const [index, place] of places.entries()) {
-        expect([...keepOut, ...places.slice(0, index)].some((other) => overlaps(place, other))).toBe(false);
-        expect(place.left >= 0 && place.top >= 0 && place.right <= 400 && place.bottom <= 300).toBe(true);
-      }
-    }),
+    fc.property(
+      fc.array(withReduced, { maxLength: 30 }),
+      fc.array(rectangle, { maxLength: 4 }),
+      (requests, keepOut) => {
+        const places = placeLabels(requests, frame, keepOut);
+        for (const [index, place] of places.entries()) {
+          expect([...keepOut, ...places.slice(0, index)].some((other) => overlaps(place, other))).toBe(false);
+          expect(place.left >= 0 && place.top >= 0 && place.right <= 400 && place.bottom <= 300).toBe(true);
+        }
+      },
+    ),
   );
 });
 

@@ -47,6 +47,15 @@ interface Size {
   height: number;
 }
 
+interface Room extends Size {
+  keepOut: readonly Rectangle[];
+  /** Room kept between two labels, px. */
+  gap: number;
+}
+
+/** Times the labels that found no place are let go first. */
+const ROUNDS = 3;
+
 /**
  * Finds a place beside its point for each label, most important first, at one of eight anchors. Smaller forms are placed
  * first, so that as many points as can be have their name; then those with room around them grow to the whole. A label
@@ -55,30 +64,78 @@ interface Size {
  */
 export function placeLabels<T extends LabelRequest>(
   requests: readonly T[],
-  frame: Size,
+  { width, height }: Size,
   keepOut: readonly Rectangle[] = [],
+  gap = 0,
 ): LabelPlace<T>[] {
+  const room: Room = { width, height, keepOut, gap };
   const ordered = [...requests].sort((a, b) => b.priority - a.priority);
-  const places: LabelPlace<T>[] = [];
-  const find = (request: T, size: Size, others: readonly Rectangle[]) =>
-    ANCHORS.map((anchor) => at(request, size, anchor)).find(
-      (box) =>
-        inside(box, frame) &&
-        ![...keepOut, ...others].some((other) => overlaps(box, other)) &&
-        !requests.some((rival) => squareTo(box, rival) < squareTo(box, request)),
-    );
-  for (const request of ordered) {
-    const place = find(request, request.reduced ?? request, places);
-    if (place) places.push({ request, isReduced: Boolean(request.reduced), ...place });
+  return growPlaces(namePlaces(ordered, requests, room), requests, room);
+}
+
+/**
+ * The smaller forms, in the given order. Then those left out go first, which is kept only when every label that had a
+ * place still has one: nothing less important takes the place of anything more important.
+ */
+function namePlaces<T extends LabelRequest>(ordered: readonly T[], rivals: readonly T[], room: Room): LabelPlace<T>[] {
+  let best = namePass(ordered, rivals, room);
+  let order = ordered;
+  for (let round = 0; round < ROUNDS && best.length < ordered.length; round++) {
+    const placed = new Set(best.map(({ request }) => request));
+    order = [...order.filter((request) => !placed.has(request)), ...order.filter((request) => placed.has(request))];
+    const next = namePass(order, rivals, room);
+    const kept = new Set(next.map(({ request }) => request));
+    if (next.length > best.length && best.every(({ request }) => kept.has(request))) best = next;
   }
-  for (const [index, place] of places.entries()) {
-    if (!place.isReduced) continue;
-    const others = places.filter((other) => other !== place);
-    const whole = find(place.request, place.request, others);
-    if (whole) places[index] = { request: place.request, isReduced: false, ...whole };
+  return best;
+}
+
+function namePass<T extends LabelRequest>(ordered: readonly T[], rivals: readonly T[], room: Room): LabelPlace<T>[] {
+  const places: LabelPlace<T>[] = [];
+  for (const request of ordered) {
+    const place = freePlace(request, request.reduced ?? request, places, rivals, room);
+    if (place) places.push({ request, isReduced: Boolean(request.reduced), ...place });
   }
   return places;
 }
+
+function growPlaces<T extends LabelRequest>(
+  places: readonly LabelPlace<T>[],
+  rivals: readonly T[],
+  room: Room,
+): LabelPlace<T>[] {
+  const grown = [...places];
+  for (const [index, place] of places.entries()) {
+    if (!place.isReduced) continue;
+    const others = grown.filter((_, at) => at !== index);
+    const whole = freePlace(place.request, place.request, others, rivals, room);
+    if (whole) grown[index] = { request: place.request, isReduced: false, ...whole };
+  }
+  return grown;
+}
+
+function freePlace(
+  request: LabelRequest,
+  size: Size,
+  others: readonly Rectangle[],
+  rivals: readonly LabelRequest[],
+  { keepOut, gap, ...frame }: Room,
+): Rectangle | undefined {
+  return ANCHORS.map((anchor) => at(request, size, anchor)).find(
+    (box) =>
+      inside(box, frame) &&
+      !keepOut.some((other) => overlaps(box, other)) &&
+      !others.some((other) => overlaps(widened(box, gap), other)) &&
+      !rivals.some((rival) => squareTo(box, rival) < squareTo(box, request)),
+  );
+}
+
+const widened = ({ left, top, right, bottom }: Rectangle, by: number): Rectangle => ({
+  left: left - by,
+  top,
+  right: right + by,
+  bottom,
+});
 
 /** The square of the distance from a box to a label's point. */
 function squareTo(box: Rectangle, { x, y }: LabelRequest): number {

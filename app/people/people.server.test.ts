@@ -22,7 +22,10 @@ import { signOut } from "./sign-out.server.ts";
 const PASSWORD = "a tern above the estuary";
 let visits = 0;
 /** Each test comes from an address of its own, so that limits do not carry over. */
-const visitor = () => ({ address: `10.0.0.${(visits += 1)}`, userAgent: "test", requestId: "r" });
+const visitor = () => {
+  visits += 1;
+  return { address: `10.0.0.${visits}`, userAgent: "test", requestId: "r" };
+};
 const member = async (...roles: Parameters<typeof makeActor>) => {
   const passwordHash = await hashPassword(PASSWORD);
   const actor = await makeActor(...roles);

@@ -1,0 +1,47 @@
+import { eq } from "drizzle-orm";
+import { ulid } from "ulid";
+import type { Actor } from "#app/audit/actor.ts";
+import { type Change, change } from "#app/audit/change.server.ts";
+import { measurement, source } from "#app/database/schema/catalogue.ts";
+import { Invalid } from "#app/errors.ts";
+import { authorise } from "#app/people/authorise.ts";
+import type { NewMeasurement } from "./measurement-input.ts";
+import { openRecord } from "./open-record.server.ts";
+import { QUANTITY_FACTS, toCanonical } from "./quantities.ts";
+
+/** The columns behind a measurement; also how intake writes them. */
+export function measurementColumns(input: NewMeasurement, enteredBy: string) {
+  const { quantity, value, error, unit } = input;
+  return {
+    ...input,
+    enteredBy,
+    valueCanonical: toCanonical(quantity, value, unit),
+    errorCanonical: error === null ? null : toCanonical(quantity, error, unit),
+  };
+}
+
+/** Proposes a measurement. Nothing is adopted by it. @throws Invalid, NotFound */
+export async function addMeasurement(actor: Actor | null, input: NewMeasurement): Promise<string> {
+  authorise(actor, "record.write");
+  return change(actor, "catalogue.add-measurement", (c) => insertMeasurement(c, input));
+}
+
+async function insertMeasurement(c: Change, input: NewMeasurement): Promise<string> {
+  const opened = await openRecord(c, input.recordId);
+  if (input.sourceId) {
+    const [known] = await c.tx.select({ id: source.id }).from(source).where(eq(source.id, input.sourceId));
+    if (!known) throw new Invalid({ sourceId: ["There is no such source."] });
+  }
+  const id = ulid();
+  await c.tx.insert(measurement).values({ id, ...measurementColumns(input, c.actor.personId) });
+  c.audit({
+    objectType: "record",
+    objectId: opened.id,
+    objectName: opened.name,
+    after: { measurement: id, ...input },
+    note: `${QUANTITY_FACTS[input.quantity].label}: ${input.rawText} ${input.unit}`,
+  });
+  // Colour and brightness are read without being adopted, so a new one may move a picture.
+  c.touch({ type: "record", id: opened.id });
+  return id;
+}

@@ -28,7 +28,7 @@ const number = (parameter: string, require: (name: string, value: number) => voi
         return value;
       } catch (problem) {
         if (!(problem instanceof RangeError)) throw problem;
-        context.addIssue({ code: "custom", message: problem.message });
+        context.addIssue({ code: "custom", message: problem.message.replace(/\.?$/, ".") });
         return z.NEVER;
       }
     });
@@ -56,7 +56,7 @@ export const DistanceQuery = z
     length: optional(number("length", requirePositive)),
     limit: optional(number("limit", requirePositive)),
   })
-  .catchall(z.never({ error: "is no parameter of this address: parallax, error, prior, length, limit." }))
+  .catchall(z.unknown().refine(() => false, "No such parameter: there are parallax, error, prior, length and limit."))
   .refine(({ prior, limit }) => !prior?.startsWith("uniform-") || limit !== undefined, {
     path: ["limit"],
     error: "limit is missing: a uniform prior needs the distance up to which it is uniform, in pc.",

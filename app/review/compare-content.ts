@@ -1,3 +1,4 @@
+import canonicalize from "canonicalize";
 import type { ExhibitContent, FigureContent, SceneContent } from "#app/exhibits/content.ts";
 import { plainWords } from "#app/exhibits/words.ts";
 
@@ -36,6 +37,11 @@ export function compareContent(before: ExhibitContent, after: ExhibitContent): M
   pushOther(moved, after.title.en, "order of the scenes", order(before, kept), order(after, new Set(old.keys())));
   const rank = { figure: 0, text: 1, scene: 2 };
   return moved.sort((a, b) => rank[a.kind] - rank[b.kind]);
+}
+
+/** Equal as sealed: what was read back from a seal has its keys in another order. */
+function same(a: unknown, b: unknown): boolean {
+  return canonicalize(a) === canonicalize(b);
 }
 
 function order(content: ExhibitContent, among: Set<string>): string {
@@ -80,7 +86,7 @@ function compareFigures(moved: Moved[], before: SceneContent, after: SceneConten
   for (const key of new Set([...Object.keys(before.figures), ...Object.keys(after.figures)])) {
     const was = before.figures[key];
     const is = after.figures[key];
-    if (JSON.stringify(was) === JSON.stringify(is)) continue;
+    if (same(was, is)) continue;
     const reads = shown(was) !== shown(is);
     moved.push({
       kind: "figure",
@@ -106,8 +112,8 @@ function compareCast(moved: Moved[], before: SceneContent, after: SceneContent):
       moved.push(change("scene", after.title.en, "joined the cast", null, member.name.en));
       continue;
     }
-    if (JSON.stringify(was) === JSON.stringify(member)) continue;
-    const sameDistance = JSON.stringify(was.distancePc) === JSON.stringify(member.distancePc);
+    if (same(was, member)) continue;
+    const sameDistance = same(was.distancePc, member.distancePc);
     const reads = [was.distance?.en.text ?? null, member.distance?.en.text ?? null] as const;
     const frenchReads = was.distance?.fr.text !== member.distance?.fr.text;
     if (!sameDistance || reads[0] !== reads[1]) {
@@ -138,10 +144,8 @@ function compareCast(moved: Moved[], before: SceneContent, after: SceneContent):
 function firstDifference(before: object, after: object): { before: string; after: string } {
   const left = before as Record<string, unknown>;
   const right = after as Record<string, unknown>;
-  const field = Object.keys({ ...left, ...right }).find(
-    (name) => JSON.stringify(left[name]) !== JSON.stringify(right[name]),
-  );
-  const say = (value: unknown) => `${field}: ${typeof value === "string" ? value : JSON.stringify(value)}`;
+  const field = Object.keys({ ...left, ...right }).find((name) => !same(left[name], right[name]));
+  const say = (value: unknown) => `${field}: ${typeof value === "string" ? value : canonicalize(value)}`;
   return { before: say(left[field ?? ""]), after: say(right[field ?? ""]) };
 }
 
@@ -167,6 +171,6 @@ function pushPlain(moved: Moved[], scene: string, what: string, before: string |
 }
 
 function pushOther(moved: Moved[], scene: string, what: string, before: unknown, after: unknown): void {
-  const say = (value: unknown) => (value === null || typeof value === "string" ? value : JSON.stringify(value));
+  const say = (value: unknown) => (value === null || typeof value === "string" ? value : (canonicalize(value) ?? null));
   if (say(before) !== say(after)) moved.push(change("scene", scene, what, say(before), say(after)));
 }

@@ -1,26 +1,28 @@
+import type { ReactNode } from "react";
 import { icrsToGalactic } from "#app/astrometry/coordinates.ts";
 import type { Language } from "#app/figures/language.ts";
 import { degreesText } from "#app/figures/office-numbers.ts";
 import type { SceneDocument } from "#app/scene/document.ts";
 import { layoutVolume } from "#app/scene/layout.ts";
-import type { SceneMember } from "#app/scene/member.ts";
+import type { CastMember } from "#app/scene/member.ts";
 import { STAGE_WORDS } from "./words.ts";
 
 interface PlaceTableProps {
   document: SceneDocument;
-  members: SceneMember[];
+  members: readonly CastMember[];
   language: Language;
   className?: string;
 }
 
-/** What the picture shows, in words: who is where, the nearest first. */
+const CELL = "py-1.5 pr-4 text-left align-baseline font-normal";
+
+/** What the picture shows, in words: who is where, the nearest first, and who has no place in it. */
 export function PlaceTable({ document, members, language, className = "" }: PlaceTableProps) {
   const { table, regimes } = STAGE_WORDS[language];
-  const distances = new Map(
-    layoutVolume(document, members, language).stars.map((star) => [star.recordId, star.distanceText]),
-  );
-  const ordered = [...members].sort((a, b) => a.distancePc.value - b.distancePc.value);
-  const cell = "py-1.5 pr-4 text-left align-baseline font-normal";
+  const layout = layoutVolume(document, members, language);
+  const kept = new Map(members.map((member) => [member.recordId, member]));
+  const distance = (recordId: string) => kept.get(recordId)?.distancePc?.value ?? 0;
+  const nearestFirst = [...layout.stars].sort((a, b) => distance(a.recordId) - distance(b.recordId));
   return (
     <div className={`overflow-x-auto ${className}`}>
       <table className="w-full border-collapse text-sm">
@@ -35,22 +37,44 @@ export function PlaceTable({ document, members, language, className = "" }: Plac
           </tr>
         </thead>
         <tbody>
-          {ordered.map((member) => {
-            const { lDeg, bDeg } = icrsToGalactic(member.raDeg, member.decDeg);
-            return (
-              <tr key={member.recordId} className="border-rule border-b">
-                <th scope="row" className={cell}>
-                  {member.name}
-                </th>
-                <td className={cell}>{distances.get(member.recordId)}</td>
-                <td className={cell}>{degreesText(lDeg, language, 1)}</td>
-                <td className={cell}>{degreesText(bDeg, language, 1)}</td>
-                <td className={cell}>{regimes[member.regime]}</td>
-              </tr>
-            );
-          })}
+          {nearestFirst.map(({ recordId, name, distanceText, regime }) => (
+            <Row key={recordId} name={name}>
+              <td className={CELL}>{distanceText}</td>
+              <DirectionCells member={kept.get(recordId)} language={language} />
+              <td className={CELL}>{regimes[regime]}</td>
+            </Row>
+          ))}
+          {layout.missing.map(({ recordId, name, reason }) => (
+            <Row key={recordId} name={name}>
+              <td className={CELL} colSpan={4}>
+                {reason}
+              </td>
+            </Row>
+          ))}
         </tbody>
       </table>
     </div>
+  );
+}
+
+function Row({ name, children }: { name: string; children: ReactNode }) {
+  return (
+    <tr className="border-rule border-b">
+      <th scope="row" className={CELL}>
+        {name}
+      </th>
+      {children}
+    </tr>
+  );
+}
+
+function DirectionCells({ member, language }: { member: CastMember | undefined; language: Language }) {
+  if (!member || member.raDeg === null || member.decDeg === null) return <td className={CELL} colSpan={2} />;
+  const { lDeg, bDeg } = icrsToGalactic(member.raDeg, member.decDeg);
+  return (
+    <>
+      <td className={CELL}>{degreesText(lDeg, language, 1)}</td>
+      <td className={CELL}>{degreesText(bDeg, language, 1)}</td>
+    </>
   );
 }

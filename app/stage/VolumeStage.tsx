@@ -2,7 +2,7 @@ import { type KeyboardEvent, lazy, Suspense, useCallback, useEffect, useId, useM
 import type { Language } from "#app/figures/language.ts";
 import type { SceneDocument } from "#app/scene/document.ts";
 import { layoutVolume } from "#app/scene/layout.ts";
-import type { SceneMember } from "#app/scene/member.ts";
+import type { CastMember } from "#app/scene/member.ts";
 import type { Orbit } from "./camera.ts";
 import { moved, orbitKey, STEP, TURN_DEG, turned } from "./orbit.ts";
 import { StageButtons } from "./StageButtons.tsx";
@@ -17,7 +17,7 @@ const StageCanvas = lazy(() => import("./StageCanvas.tsx"));
 
 export interface VolumeStageProps {
   document: SceneDocument;
-  members: SceneMember[];
+  members: readonly CastMember[];
   language: Language;
   /** Shown until the stage can draw, and where it never can. */
   stillUrl?: string | null;

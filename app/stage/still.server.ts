@@ -3,7 +3,7 @@ import type { Language } from "#app/figures/language.ts";
 import { renderFrame } from "#app/raster/frame.ts";
 import type { SceneDocument } from "#app/scene/document.ts";
 import { layoutVolume } from "#app/scene/layout.ts";
-import type { SceneMember } from "#app/scene/member.ts";
+import type { CastMember } from "#app/scene/member.ts";
 import { cameraFor, type Orbit } from "./camera.ts";
 import { stageFonts } from "./fonts.server.ts";
 import { NIGHT } from "./night.ts";
@@ -23,11 +23,11 @@ export interface StillOptions {
 
 /**
  * A scene as a PNG, drawn by the same rasteriser as on a kiosk: the same content gives the same bytes.
- * @throws RangeError for a member without a finite distance
+ * Those who cannot be placed are left out, as in the layout.
  */
 export async function renderStill(
   document: SceneDocument,
-  members: SceneMember[],
+  members: readonly CastMember[],
   options: StillOptions,
 ): Promise<Buffer> {
   const { width, height, language, selectedId, view } = options;

@@ -43,12 +43,13 @@ export function projectPoints(projector: Projector, points: Points): Float64Arra
   const position = points.geometry.getAttribute("position");
   const places = new Float64Array(position.count * 3);
   const place = new Float64Array(3);
-  for (let at = 0; at < position.count; at++) {
-    transform(points.matrixWorld, position.getX(at), position.getY(at), position.getZ(at), place);
+  for (let at = 0; at < places.length; at += 3) {
+    const vertex = at / 3;
+    transform(points.matrixWorld, position.getX(vertex), position.getY(vertex), position.getZ(vertex), place);
     const seen = project(projector, place[0]!, place[1]!, place[2]!, place);
-    places[at * 3] = place[0]!;
-    places[at * 3 + 1] = place[1]!;
-    places[at * 3 + 2] = seen ? place[2]! : Number.NaN;
+    places[at] = place[0]!;
+    places[at + 1] = place[1]!;
+    places[at + 2] = seen ? place[2]! : Number.NaN;
   }
   return places;
 }

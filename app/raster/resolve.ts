@@ -6,6 +6,9 @@ const STEPS = 16384;
 
 const TABLE = Uint8Array.from({ length: STEPS + 1 }, (_, step) => Math.round(srgbFromLinear(step / STEPS) * 255));
 
+/** Alpha in a pixel read as one little-endian number: every machine that runs Node or Chromium is little-endian. */
+const OPAQUE = 0xff000000;
+
 /** One channel, linear light to an sRGB byte; held at 0 and 1. */
 export function byteFromLinear(value: number): number {
   return TABLE[value <= 0 ? 0 : value >= 1 ? STEPS : (value * STEPS + 0.5) | 0] ?? 0;
@@ -20,36 +23,45 @@ export function resolveFrame(surface: Surface): void {
   }
 }
 
-function eachRow(surface: Surface, tile: number, row: (from: number, to: number) => void): void {
+interface Span {
+  left: number;
+  right: number;
+  top: number;
+  bottom: number;
+}
+
+function spanOf(surface: Surface, tile: number): Span {
   const left = (tile % surface.tilesAcross) * TILE_WIDTH;
   const top = Math.floor(tile / surface.tilesAcross) * TILE_HEIGHT;
   const right = Math.min(left + TILE_WIDTH, surface.width);
-  const bottom = Math.min(top + TILE_HEIGHT, surface.height);
-  for (let y = top; y < bottom; y++) row(y * surface.width + left, y * surface.width + right);
+  return { left, right, top, bottom: Math.min(top + TILE_HEIGHT, surface.height) };
 }
 
+// The lookup is written out three times: this loop runs over every pixel that anything is drawn near.
 function resolveTile(surface: Surface, tile: number): void {
-  const { light, bytes } = surface;
-  eachRow(surface, tile, (from, to) => {
-    for (let pixel = from; pixel < to; pixel++) {
-      const read = pixel * 3;
-      const write = pixel * 4;
-      bytes[write] = byteFromLinear(light[read] ?? 0);
-      bytes[write + 1] = byteFromLinear(light[read + 1] ?? 0);
-      bytes[write + 2] = byteFromLinear(light[read + 2] ?? 0);
-      bytes[write + 3] = 255;
+  const { light, width } = surface;
+  const pixels = new Uint32Array(surface.bytes.buffer);
+  const { left, right, top, bottom } = spanOf(surface, tile);
+  for (let y = top; y < bottom; y++) {
+    let read = (y * width + left) * 3;
+    for (let pixel = y * width + left; pixel < y * width + right; pixel++, read += 3) {
+      const red = light[read]!;
+      const green = light[read + 1]!;
+      const blue = light[read + 2]!;
+      pixels[pixel] =
+        TABLE[red >= 1 ? STEPS : (red * STEPS + 0.5) | 0]! |
+        (TABLE[green >= 1 ? STEPS : (green * STEPS + 0.5) | 0]! << 8) |
+        (TABLE[blue >= 1 ? STEPS : (blue * STEPS + 0.5) | 0]! << 16) |
+        OPAQUE;
     }
-  });
+  }
 }
 
 function fillTile(surface: Surface, tile: number): void {
-  const [red, green, blue] = surface.background.map(byteFromLinear);
-  eachRow(surface, tile, (from, to) => {
-    for (let write = from * 4; write < to * 4; write += 4) {
-      surface.bytes[write] = red ?? 0;
-      surface.bytes[write + 1] = green ?? 0;
-      surface.bytes[write + 2] = blue ?? 0;
-      surface.bytes[write + 3] = 255;
-    }
-  });
+  const [red = 0, green = 0, blue = 0] = surface.background.map(byteFromLinear);
+  const pixels = new Uint32Array(surface.bytes.buffer);
+  const { left, right, top, bottom } = spanOf(surface, tile);
+  for (let y = top; y < bottom; y++) {
+    pixels.fill(red | (green << 8) | (blue << 16) | OPAQUE, y * surface.width + left, y * surface.width + right);
+  }
 }

@@ -1,8 +1,15 @@
 /** Places a stamp can stand at inside a pixel, a side. */
 export const PHASES = 4;
 const SIZE_STEPS = 4;
-/** The light ends at so many times the star's size. */
-const REACH = 6;
+/** The light of a star with a halo ends at so many times its size, that of a small one sooner: it has none. */
+const HALO_REACH = 6;
+const CORE_REACH = 2.4;
+/** Below the first size, px, there is no halo; from the second on it is whole. */
+const HALO_FROM_PX = 1.5;
+const HALO_WHOLE_PX = 3;
+
+const haloOf = (size: number) => Math.min(Math.max((size - HALO_FROM_PX) / (HALO_WHOLE_PX - HALO_FROM_PX), 0), 1);
+const reachOf = (size: number) => (size > HALO_FROM_PX ? HALO_REACH : CORE_REACH);
 
 /** The light of one star of a size at one place inside its pixel: `side` by `side` values around `middle`. */
 export interface Stamp {
@@ -32,16 +39,16 @@ export function stampOf(sizePx: number, phaseX: number, phaseY: number): Stamp {
 /** A core that is brighter than the screen, a soft shoulder, and a faint halo that ends at nothing. */
 function profile(radius: number, size: number): number {
   const r = radius / size;
-  if (r >= REACH) return 0;
+  if (r >= reachOf(size)) return 0;
   const core = 3 * Math.exp(-2.6 * r * r);
-  const shoulder = 0.22 * Math.exp(-0.6 * r * r);
-  const fade = 1 - r / REACH;
-  return core + shoulder + 0.06 * fade * fade;
+  const halo = haloOf(size);
+  const fade = 1 - r / HALO_REACH;
+  return core + halo * (0.22 * Math.exp(-0.6 * r * r) + 0.06 * fade * fade);
 }
 
 /** All stamps of one size carry the same flux: a star must not flicker while it moves through a pixel. */
 function makeStamp(size: number, x: number, y: number): Stamp {
-  const middle = Math.ceil(size * REACH) + 1;
+  const middle = Math.ceil(size * reachOf(size));
   const side = middle * 2 + 1;
   const values = new Float32Array(side * side);
   let sum = 0;
@@ -75,7 +82,7 @@ function sampled(left: number, top: number, size: number): number {
 /** The profile's whole light over the plane, by the midpoint rule in rings. */
 export function fluxOf(size: number): number {
   const rings = 400;
-  const width = (REACH * size) / rings;
+  const width = (reachOf(size) * size) / rings;
   let flux = 0;
   for (let ring = 0; ring < rings; ring++) {
     const radius = (ring + 0.5) * width;

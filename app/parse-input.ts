@@ -27,7 +27,8 @@ export function parseInput<S extends z.ZodType>(schema: S, input: FormData | Rec
   const fields: FieldErrors = {};
   for (const issue of parsed.error.issues) {
     const name = fieldName(issue.path);
-    fields[name] = [...(fields[name] ?? []), issue.message];
+    // hasOwn: a field may be called "constructor".
+    fields[name] = [...(Object.hasOwn(fields, name) ? (fields[name] ?? []) : []), issue.message];
   }
   throw new Invalid(fields);
 }

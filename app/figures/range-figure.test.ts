@@ -50,6 +50,13 @@ test("the same distance in the other units, large and small, stays in digits", (
   expect(figure(around(206_265, 40), "au")).toBe("206,270 astronomical units (between 206,230 and 206,310)");
 });
 
+test("the unit of a range takes the plural of its last number", () => {
+  const figure = (distance: RangeNumbers) =>
+    spaced(distanceFigure({ distance, regime: "wide", unit: "ly", form: "range", language: "fr" }).text);
+  expect(figure({ value: 2, low: 1.76, high: 2.31 })).toBe("entre 1,76 et 2,31 années-lumière");
+  expect(figure({ value: 1.2, low: 1.04, high: 1.41 })).toBe("entre 1,04 et 1,41 année-lumière");
+});
+
 test("a number and its unit never part; the French groups are narrow no-break spaces", () => {
   const distance = { value: 12_345, low: 12_225, high: 12_465 };
   const input = { distance, regime: "firm", unit: "ly", form: "value-and-range", language: "fr" } as const;

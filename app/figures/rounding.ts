@@ -15,11 +15,9 @@ export function placeOfUncertainty(uncertainty: Decimal, rule: RoundingRule = "p
     const two = leading(uncertainty, 2);
     return two.digits === 100n ? two.scale - 1 : two.scale;
   }
+  // After a carry, 999.6 to 1000, both branches below still hold: 1000 keeps two.
   const three = leading(uncertainty, 3);
-  // 999.6 carries to 1000: the same number with one digit more.
-  const { digits, scale } = three.digits === 1000n ? { digits: 100n, scale: three.scale - 1 } : three;
-  if (digits <= 354n) return scale - 1;
-  return scale - 2;
+  return three.digits <= 354n ? three.scale - 1 : three.scale - 2;
 }
 
 function leading(value: Decimal, count: number): Decimal {

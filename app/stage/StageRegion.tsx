@@ -6,7 +6,7 @@ interface StageRegionProps {
   /** The element that says what the keys do. */
   keysId: string;
   wheelAlways: boolean;
-  onKeyDown: (event: KeyboardEvent) => void;
+  onKeyDown: (event: KeyboardEvent<HTMLElement>) => void;
   onTap: (x: number, y: number) => void;
   changeOrbit: ChangeOrbit;
 }

@@ -1,14 +1,16 @@
-import { type KeyboardEvent, lazy, Suspense, useCallback, useEffect, useId, useMemo, useRef, useState } from "react";
+import { lazy, Suspense, useCallback, useEffect, useId, useMemo, useRef, useState } from "react";
 import type { Language } from "#app/figures/language.ts";
 import type { SceneDocument } from "#app/scene/document.ts";
 import { layoutVolume } from "#app/scene/layout.ts";
 import type { CastMember } from "#app/scene/member.ts";
 import type { Orbit } from "./camera.ts";
-import { moved, orbitKey, STEP, TURN_DEG, turned } from "./orbit.ts";
+import { moved, STEP, TURN_DEG, turned } from "./orbit.ts";
 import { StageButtons } from "./StageButtons.tsx";
 import type { PickRecord } from "./StageCanvas.tsx";
+import { StageHelp } from "./StageHelp.tsx";
 import { StageRegion } from "./StageRegion.tsx";
-import { stepStar } from "./step-star.ts";
+import { StillOnFailure } from "./StillOnFailure.tsx";
+import { stageKeys } from "./stage-keys.ts";
 import { useHydrated } from "./use-hydrated.ts";
 import { STAGE_WORDS } from "./words.ts";
 
@@ -52,31 +54,31 @@ export function VolumeStage(props: VolumeStageProps) {
   const onTap = (x: number, y: number) => select(pick.current?.(x, y, kiosk ? 48 : 24) ?? null);
   const selected = layout.stars.find(({ recordId }) => recordId === selectedId);
 
-  function onKeyDown(event: KeyboardEvent) {
-    if (event.altKey || event.ctrlKey || event.metaKey) return;
-    const key = event.key.length === 1 ? event.key.toLowerCase() : event.key;
-    const ids = layout.stars.map(({ recordId }) => recordId);
-    const next = orbitKey(orbit, key);
-    if (next) changeOrbit((now) => orbitKey(now, key) ?? now);
-    else if (key === "n") select(stepStar(ids, selectedId, 1));
-    else if (key === "p") select(stepStar(ids, selectedId, -1));
-    else if (key === "Home") reset();
-    else return;
-    event.preventDefault();
-  }
+  const onKeyDown = stageKeys({
+    orbit,
+    changeOrbit,
+    reset,
+    recordIds: layout.stars.map(({ recordId }) => recordId),
+    selectedId,
+    select,
+    middleStar: ({ clientWidth: width, clientHeight: height }) =>
+      pick.current?.(width / 2, height / 2, Math.hypot(width, height)) ?? null,
+  });
 
   return (
-    <div className={`night flex min-h-0 flex-col ${className}`}>
+    <div className={`night group flex min-h-0 flex-col ${className}`}>
       <div className="relative min-h-0 grow overflow-hidden">
         {!ready && stillUrl && (
           <img src={stillUrl} alt={stillAlt} className="absolute inset-0 size-full object-contain" />
         )}
         {hydrated && (
-          <Suspense fallback={null}>
-            <div className="absolute inset-0">
-              <StageCanvas {...{ document, layout, language, selectedId, orbit, onReady }} large={kiosk} />
-            </div>
-          </Suspense>
+          <StillOnFailure onFailure={() => setReady(false)}>
+            <Suspense fallback={null}>
+              <div className="absolute inset-0">
+                <StageCanvas {...{ document, layout, language, selectedId, orbit, onReady }} large={kiosk} />
+              </div>
+            </Suspense>
+          </StillOnFailure>
         )}
         {ready && (
           <StageRegion name={words.stage} keysId={keysId} wheelAlways={kiosk} {...{ onKeyDown, onTap, changeOrbit }} />
@@ -84,9 +86,7 @@ export function VolumeStage(props: VolumeStageProps) {
       </div>
       {ready && (
         <>
-          <p id={keysId} className="sr-only">
-            {stillAlt} {words.keys}
-          </p>
+          <StageHelp id={keysId} {...{ words, stillAlt, kiosk }} />
           <p aria-live="polite" className="sr-only">
             {selected ? words.chosen(selected.name, selected.distanceText) : words.nothingChosen}
           </p>

@@ -9,6 +9,7 @@ export interface StageWords {
   startAgain: string;
   /** Named for the keyboard and for screen readers. */
   stage: string;
+  gestures: string;
   keys: string;
   nothingChosen: string;
   /** The bar is true at one distance from the eye only. */
@@ -26,7 +27,8 @@ export const STAGE_WORDS: Record<Language, StageWords> = {
     farther: "Farther",
     startAgain: "Start again",
     stage: "The stars in space",
-    keys: "Arrow keys turn, plus and minus go nearer and farther, N and P choose a star, Home starts again.",
+    gestures: "Drag to turn, pinch or use the wheel to go nearer, touch a star to choose it.",
+    keys: "Arrow keys turn, plus and minus go nearer and farther, N and P go through the stars, Enter chooses the one in the middle, Escape none, Home or 0 starts again.",
     nothingChosen: "No star chosen",
     whereSunStands: (length) => `${length} where the Sun stands`,
     chosen: (name, distance) => `${name}, ${distance}`,
@@ -47,7 +49,9 @@ export const STAGE_WORDS: Record<Language, StageWords> = {
     farther: "Plus loin",
     startAgain: "Recommencer",
     stage: "Les étoiles dans l’espace",
-    keys: "Les flèches tournent, plus et moins rapprochent et éloignent, N et P choisissent une étoile, Origine recommence.",
+    gestures:
+      "Faites glisser pour tourner, pincez ou utilisez la molette pour approcher, touchez une étoile pour la choisir.",
+    keys: "Les flèches tournent, plus et moins rapprochent et éloignent, N et P passent d’une étoile à l’autre, Entrée choisit celle du milieu, Échap aucune, Origine ou 0 recommence.",
     nothingChosen: "Aucune étoile choisie",
     whereSunStands: (length) => `${length} là où se trouve le Soleil`,
     chosen: (name, distance) => `${name}, ${distance}`,

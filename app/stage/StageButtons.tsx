@@ -2,13 +2,14 @@ import type { StageWords } from "./words.ts";
 
 interface StageButtonsProps {
   words: StageWords;
+  kiosk: boolean;
   onTurn: (direction: -1 | 1) => void;
   onMove: (direction: "nearer" | "farther") => void;
   onReset: () => void;
 }
 
 /** Everything that a drag, a pinch or a key does can be done by pressing a button. */
-export function StageButtons({ words, onTurn, onMove, onReset }: StageButtonsProps) {
+export function StageButtons({ words, kiosk, onTurn, onMove, onReset }: StageButtonsProps) {
   const buttons: [string, () => void][] = [
     [words.turnLeft, () => onTurn(-1)],
     [words.turnRight, () => onTurn(1)],
@@ -23,7 +24,7 @@ export function StageButtons({ words, onTurn, onMove, onReset }: StageButtonsPro
           key={name}
           type="button"
           onClick={press}
-          className="tap grow border-r border-rule px-3 font-head font-medium text-ink text-sm last:border-r-0 hover:bg-paper-shade focus-visible:-outline-offset-4"
+          className={`tap grow border-r border-rule px-3 font-head font-medium text-ink last:border-r-0 hover:bg-paper-shade focus-visible:-outline-offset-4 ${kiosk ? "py-6 text-xl" : "text-sm"}`}
         >
           {name}
         </button>

@@ -1,5 +1,5 @@
 import { Canvas, useThree } from "@react-three/fiber";
-import { useEffect, useLayoutEffect, useMemo, useRef } from "react";
+import { useEffect, useLayoutEffect, useMemo, useRef, useState } from "react";
 import type { PerspectiveCamera } from "three";
 import type { Language } from "#app/figures/language.ts";
 import { RasterRenderer } from "#app/raster/raster-renderer.ts";
@@ -31,9 +31,11 @@ export default function StageCanvas(props: StageCanvasProps) {
   const fonts = useFonts();
   const renderer = useRef<RasterRenderer | null>(null);
   const { onReady } = props;
+  const [failure, setFailure] = useState<unknown>(null);
   useEffect(() => {
     if (fonts) onReady((x, y, radius) => recordAt(renderer.current, x, y, radius));
   }, [fonts, onReady]);
+  if (failure !== null) throw failure;
   if (!fonts) return null;
   return (
     <Canvas
@@ -43,13 +45,27 @@ export default function StageCanvas(props: StageCanvasProps) {
       events={undefined}
       aria-hidden="true"
       gl={({ canvas }) => {
-        renderer.current = new RasterRenderer({ canvas: canvas as HTMLCanvasElement, background: NIGHT, fonts });
+        const made = new RasterRenderer({ canvas: canvas as HTMLCanvasElement, background: NIGHT, fonts });
+        renderer.current = tellFailure(made, setFailure);
         return renderer.current;
       }}
     >
       <View {...props} />
     </Canvas>
   );
+}
+
+/** Frames are drawn outside React, which would not hear of an error there, and the next frame would fail again. */
+function tellFailure(renderer: RasterRenderer, onFailure: (failure: unknown) => void): RasterRenderer {
+  const draw = renderer.render.bind(renderer);
+  renderer.render = (scene, camera) => {
+    try {
+      draw(scene, camera);
+    } catch (error) {
+      onFailure(error ?? new Error("the stage could not be drawn"));
+    }
+  };
+  return renderer;
 }
 
 function recordAt(renderer: RasterRenderer | null, x: number, y: number, radiusPx: number): string | null {

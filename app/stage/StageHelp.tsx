@@ -13,7 +13,7 @@ interface StageHelpProps {
 export function StageHelp({ words, stillAlt, id, kiosk }: StageHelpProps) {
   const keysShown = kiosk ? "sr-only group-has-[[role=application]:focus-visible]:not-sr-only" : "";
   return (
-    <p id={id} className="border-rule border-t px-3 py-1.5 text-ink-soft text-xs">
+    <p id={id} className={`border-rule border-t px-3 text-ink-soft ${kiosk ? "py-3 text-lg" : "py-1.5 text-xs"}`}>
       <span className="sr-only">{stillAlt} </span>
       {words.gestures} <span className={keysShown}>{words.keys}</span>
     </p>

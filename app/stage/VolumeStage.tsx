@@ -92,6 +92,7 @@ export function VolumeStage(props: VolumeStageProps) {
           </p>
           <StageButtons
             words={words}
+            kiosk={kiosk}
             onTurn={(direction) => changeOrbit((now) => turned(now, direction * TURN_DEG, 0))}
             onMove={(direction) => changeOrbit((now) => moved(now, direction === "nearer" ? 1 / STEP : STEP))}
             onReset={reset}

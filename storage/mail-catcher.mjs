@@ -1,5 +1,5 @@
 // The SMTP catcher: takes every mail on loopback and keeps it as a file. Nothing leaves this machine.
-// Run as a program: node storage/mail-catcher.mjs FOLDER; prints the port it listens on.
+// Run as a program: node storage/mail-catcher.mjs FOLDER PORT
 import { mkdirSync } from "node:fs";
 import { rename, writeFile } from "node:fs/promises";
 import { join } from "node:path";
@@ -54,7 +54,6 @@ export function startMailCatcher(folder, port = 0) {
 }
 
 if (process.argv[1] && import.meta.url === pathToFileURL(process.argv[1]).href) {
-  const { port, close } = await startMailCatcher(process.argv[2] ?? "mail");
-  console.log(port);
+  const { close } = await startMailCatcher(process.argv[2] ?? "mail", Number(process.argv[3] ?? 0));
   process.on("SIGTERM", () => close().then(() => process.exit(0)));
 }

@@ -1,19 +1,25 @@
+import { cannotWrite, diskFull } from "./messages.mjs";
+
 /** Something that a person must put right before the program can start: one clear sentence, exit 1. */
-export class Refusal extends Error {}
+export class Refusal extends Error {
+  /** @param {string} sentence @param {number} [exitCode] */
+  constructor(sentence, exitCode = 1) {
+    super(sentence);
+    this.exitCode = exitCode;
+  }
+}
 
 /**
- * Turns the usual errors of files and sockets into a sentence that says what to do.
+ * Turns the usual errors of files into a sentence that says what to do.
  * @param {unknown} error
- * @param {string} doing what was being done, such as "writing to storage/var"
+ * @param {string} folder what was being written to
  * @returns {unknown} a Refusal where the error is a known one, otherwise the error itself
  */
-export function asRefusal(error, doing) {
+export function asRefusal(error, folder) {
   const code = /** @type {NodeJS.ErrnoException} */ (error)?.code;
-  if (code === "ENOSPC" || code === "EDQUOT") {
-    return new Refusal(`The disk is full (${doing}). Free some space, then start again; nothing is lost.`);
-  }
-  if (code === "EACCES" || code === "EPERM" || code === "EROFS") {
-    return new Refusal(`No permission: ${doing}. Give this user the right to write there, or set ALIDADE_VAR to a folder of its own.`);
+  if (code === "ENOSPC" || code === "EDQUOT") return new Refusal(diskFull(`writing to ${folder}`));
+  if (code === "EACCES" || code === "EPERM" || code === "EROFS" || code === "ENOTDIR") {
+    return new Refusal(cannotWrite(folder, code));
   }
   return error;
 }

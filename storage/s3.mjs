@@ -1,21 +1,21 @@
-import { spawn } from "node:child_process";
-import { mkdirSync, openSync, writeFileSync } from "node:fs";
+import { mkdirSync } from "node:fs";
 import { join } from "node:path";
 import { setTimeout as pause } from "node:timers/promises";
 import { ROOT } from "./paths.mjs";
 import { freePort } from "./ports.mjs";
+import { endChild, hasEnded, spawnChild } from "./processes.mjs";
 
 export const BUCKET = "alidade-media";
 
 /**
  * Starts the S3 stand-in on loopback. Its data is plain files under `folder`.
  * @param {string} folder
+ * @param {{ owner?: string, port?: number }} [options] owner: the stack whose child it is
  */
-export async function startS3(folder) {
+export async function startS3(folder, { owner = folder, port: wantedPort = 0 } = {}) {
   mkdirSync(join(folder, "data"), { recursive: true });
-  const port = await freePort();
-  const log = openSync(join(folder, "s3.log"), "a");
-  const child = spawn(
+  const port = await freePort(wantedPort);
+  const child = spawnChild(
     process.execPath,
     [
       // s3rver signs with digests that OpenSSL 3 calls legacy.
@@ -30,17 +30,23 @@ export async function startS3(folder) {
       "--configure-bucket",
       BUCKET,
     ],
-    { stdio: ["ignore", log, log], detached: true },
+    { owner, log: join(folder, "s3.log") },
   );
-  writeFileSync(join(folder, "port"), String(port));
   const endpoint = `http://127.0.0.1:${port}`;
   for (let tries = 0; tries < 200; tries += 1) {
-    if (child.exitCode !== null) throw new Error(`The S3 stand-in did not start; see ${join(folder, "s3.log")}.`);
-    if (await fetch(endpoint).then(() => true, () => false)) break;
+    if (hasEnded(child)) throw new Error(`The S3 stand-in did not start; see ${join(folder, "s3.log")}.`);
+    if (
+      await fetch(endpoint).then(
+        () => true,
+        () => false,
+      )
+    )
+      break;
     await pause(50);
   }
   return {
     process: child,
+    port,
     environment: {
       S3_ENDPOINT: endpoint,
       S3_REGION: "us-east-1",
@@ -48,6 +54,6 @@ export async function startS3(folder) {
       S3_ACCESS_KEY_ID: "S3RVER",
       S3_SECRET_ACCESS_KEY: "S3RVER",
     },
-    stop: async () => void child.kill("SIGTERM"),
+    stop: () => endChild(child, 500),
   };
 }

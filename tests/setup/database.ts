@@ -20,16 +20,31 @@ Object.assign(process.env, inject("s3"), {
   PUBLIC_URL: "http://127.0.0.1:4999",
 });
 
-const connection = await mysql.createConnection(server.href);
-await connection.query(`DROP DATABASE IF EXISTS \`${name}\``);
-await connection.query(`CREATE DATABASE \`${name}\``);
-await connection.query(`USE \`${name}\``);
-await migrate(drizzle({ client: connection }), { migrationsFolder: "drizzle/migrations" });
-await connection.end();
-
-afterAll(async () => {
+/** Connections that are open would be left without a database. */
+async function closePool(): Promise<void> {
   const { closeDatabase } = await import("#app/database/db.server.ts");
   await closeDatabase();
+}
+
+async function makeDatabase(): Promise<void> {
+  const connection = await mysql.createConnection(server.href);
+  await connection.query(`DROP DATABASE IF EXISTS \`${name}\``);
+  await connection.query(`CREATE DATABASE \`${name}\``);
+  await connection.query(`USE \`${name}\``);
+  await migrate(drizzle({ client: connection }), { migrationsFolder: "drizzle/migrations" });
+  await connection.end();
+}
+
+/** Makes this worker's database anew, empty and migrated: for a file that must not see what earlier tests left. */
+export async function cleanDatabase(): Promise<void> {
+  await closePool();
+  await makeDatabase();
+}
+
+await makeDatabase();
+
+afterAll(async () => {
+  await closePool();
   const last = await mysql.createConnection(server.href);
   await last.query(`DROP DATABASE IF EXISTS \`${name}\``);
   await last.end();

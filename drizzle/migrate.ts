@@ -1,0 +1,19 @@
+import { drizzle } from "drizzle-orm/mysql2";
+import { migrate } from "drizzle-orm/mysql2/migrator";
+import mysql from "mysql2/promise";
+import { takeLocalEnvironment } from "#storage/local-environment.mjs";
+
+// npm run db:migrate: brings the database to the newest migration. Two that start at once take turns.
+const WAIT_SECONDS = 60;
+
+takeLocalEnvironment();
+const connection = await mysql.createConnection({ uri: process.env.DATABASE_URL, timezone: "Z" });
+try {
+  const [rows] = await connection.query<mysql.RowDataPacket[]>("SELECT GET_LOCK('alidade_migrate', ?) AS taken", [
+    WAIT_SECONDS,
+  ]);
+  if (rows[0]?.taken !== 1) throw new Error("Another migration of this database does not end.");
+  await migrate(drizzle({ client: connection }), { migrationsFolder: "drizzle/migrations" });
+} finally {
+  await connection.end();
+}

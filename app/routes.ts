@@ -6,7 +6,14 @@ export default [
   // -- the office: signed-in people (routes/office.tsx checks who enters) --
   layout("routes/office.tsx", [
     // desk
-    // stars, sources, intake
+    route("stars", "routes/stars/stars.tsx"),
+    route("stars/new", "routes/stars/new.tsx"),
+    route("stars/:record", "routes/stars/star.tsx"),
+    route("stars/:record/edit", "routes/stars/edit.tsx"),
+    route("sources", "routes/sources/sources.tsx"),
+    route("sources/new", "routes/sources/new.tsx"),
+    route("sources/:source", "routes/sources/source.tsx"),
+    // intake
     // exhibits, media
     // reviews, editions, kiosks
     // people, audit, mail, account, pattern book
@@ -26,6 +33,7 @@ export default [
   route("reset-password/:token", "routes/account/reset-password.tsx"),
   route("invitation/:token", "routes/account/invitation.tsx"),
   // -- api --
+  route("api/distance", "routes/api/distance.ts"),
   route("api/*", "routes/api/not-found.ts"),
   // -- feeds, pictures, kiosks: anybody --
   route("feed/:exhibit.json", "routes/feed/feed.ts"),

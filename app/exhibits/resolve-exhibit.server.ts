@@ -7,7 +7,7 @@ import { NotFound } from "#app/errors.ts";
 import { claimsOf } from "#app/scene/claims.ts";
 import { SceneDocument } from "#app/scene/document.ts";
 import type { CastContent, ExhibitContent, FigureContent, PictureContent, SceneContent } from "./content.ts";
-import { figureWords } from "./figure-words.ts";
+import { figureWordsOrReason } from "./figure-words.ts";
 import { parseWords } from "./words.ts";
 
 interface Rows {
@@ -86,7 +86,9 @@ const IN_CAST = { quantity: "distance", unit: "ly", form: "value" } as const;
 
 function resolveMember(record: CastRecord, labelled: boolean, french: boolean): CastContent {
   const { distance } = record;
-  const range = distance?.pc ? { value: distance.pc.value, low: distance.pc.low, high: distance.pc.high } : null;
+  const words = distance?.pc ? figureWordsOrReason(distance, IN_CAST) : null;
+  const range =
+    distance?.pc && words?.en ? { value: distance.pc.value, low: distance.pc.low, high: distance.pc.high } : null;
   return {
     recordId: record.id,
     name: { en: record.name.en, fr: french ? record.name.fr : null },
@@ -100,8 +102,7 @@ function resolveMember(record: CastRecord, labelled: boolean, french: boolean): 
     distancePc: range,
     regime: distance?.regime ?? null,
     method: distance?.method ?? null,
-    distance:
-      distance && range ? { en: figureWords(distance, IN_CAST, "en"), fr: figureWords(distance, IN_CAST, "fr") } : null,
+    distance: words?.en ? { en: words.en, fr: words.fr } : null,
     source: record.source,
     vetted: record.vetted,
   };
@@ -115,16 +116,11 @@ function resolveFigure(
   const { recordId, quantity, unit, form } = row;
   const bound = { recordId, quantity, unit, form, source: record?.source ?? null };
   const distance = record?.distance;
-  if (!distance?.pc) {
-    const reason = distance?.reason ?? `${record?.name.en ?? "The record"} has no adopted parallax.`;
-    return { ...bound, en: null, fr: null, reason };
+  if (!distance) {
+    return { ...bound, en: null, fr: null, reason: `${record?.name.en ?? "The record"} has no adopted parallax.` };
   }
-  return {
-    ...bound,
-    en: figureWords(distance, row, "en"),
-    fr: french ? figureWords(distance, row, "fr") : null,
-    reason: null,
-  };
+  const { en, fr, reason } = figureWordsOrReason(distance, row);
+  return { ...bound, en, fr: french ? fr : null, reason };
 }
 
 function pictureOf(found: typeof media.$inferSelect | undefined, french: boolean): PictureContent | null {

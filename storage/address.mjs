@@ -1,7 +1,7 @@
 import { badPort } from "./messages.mjs";
 import { Refusal } from "./refusal.mjs";
 
-export const DEFAULT_PORT = 3000;
+export const DEFAULT_PORT = 4310;
 
 /**
  * Where the application listens, and the address that people use.

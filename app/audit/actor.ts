@@ -1,3 +1,7 @@
+import { ROLES, type Role } from "#app/database/enums.ts";
+
+export { ROLES, type Role };
+
 /** Who does something: a person at a request, with what the rules and the audit need of them. */
 export interface Actor {
   personId: string;
@@ -7,6 +11,3 @@ export interface Actor {
   sessionId: string | null;
   requestId: string;
 }
-
-export const ROLES = ["editor", "scientist", "publisher", "admin"] as const;
-export type Role = (typeof ROLES)[number];

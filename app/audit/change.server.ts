@@ -4,37 +4,10 @@ import { auditEntry } from "#app/database/schema/audit.ts";
 import { outbox } from "#app/database/schema/jobs.ts";
 import { Conflict } from "#app/errors.ts";
 import type { Actor } from "./actor.ts";
-import { applyConsequences, type Touched } from "./consequences.server.ts";
+import type { AuditNote, Change, MailPromise, Touched } from "./change-contract.ts";
+import { applyConsequences } from "./consequences.server.ts";
 
-export interface AuditNote {
-  objectType: string;
-  objectId: string;
-  objectName: string;
-  before?: unknown;
-  after?: unknown;
-  note?: string;
-}
-
-/** What mail/ knows how to write; the payload is checked there. */
-export interface MailPromise {
-  to: string;
-  subject: string;
-  text: string;
-}
-
-/** What a verb does besides its own rows; everything lands in the same transaction. */
-export interface Change {
-  tx: Transaction;
-  actor: Actor;
-  /** One row of the audit log. A change without one is refused. */
-  audit(note: AuditNote): void;
-  /** A mail that is sent only if the change is committed. */
-  mail(message: MailPromise): void;
-  /** Names an object whose readers (seals) must be looked at again before the commit. */
-  touch(object: Touched): void;
-  /** Says that nothing needed changing: no audit row is demanded. */
-  unchanged(): void;
-}
+export type { AuditNote, Change, MailPromise };
 
 const ATTEMPTS = 4;
 

@@ -1,11 +1,6 @@
-import type { Change } from "./change.server.ts";
+import type { Change, Touched } from "./change-contract.ts";
 
-/** An object whose change may move what others have signed. */
-export type Touched =
-  | { type: "record"; id: string }
-  | { type: "source"; id: string }
-  | { type: "media"; id: string }
-  | { type: "exhibit"; id: string };
+export type { Touched };
 
 type Consequence = (change: Change, touched: readonly Touched[]) => Promise<void>;
 

@@ -1,5 +1,8 @@
 /** Closed lists that both the tables and the forms use. Free of Drizzle, so that browser code may import them. */
 
+export const ROLES = ["editor", "scientist", "publisher", "admin"] as const;
+export type Role = (typeof ROLES)[number];
+
 export const PERSON_STATES = ["invited", "active", "deactivated"] as const;
 export type PersonState = (typeof PERSON_STATES)[number];
 

@@ -1,7 +1,6 @@
 import { bigint, index, int, mysqlEnum, mysqlTable, primaryKey, uniqueIndex, varchar } from "drizzle-orm/mysql-core";
-import { ROLES } from "#app/audit/actor.ts";
 import { createdAt, digest, exact, id, instant, ref, version, words } from "../columns.ts";
-import { LINK_PURPOSES, PERSON_STATES } from "../enums.ts";
+import { LINK_PURPOSES, PERSON_STATES, ROLES } from "../enums.ts";
 
 export const person = mysqlTable(
   "person",

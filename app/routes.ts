@@ -39,5 +39,9 @@ export default [
   route("feed/:exhibit.json", "routes/feed/feed.ts"),
   route("stills/:digest.png", "routes/feed/still.ts"),
   // -- health --
+  route("healthz", "routes/health/healthz.ts"),
+  route("readyz", "routes/health/readyz.ts"),
+  route("healthz", "routes/health/healthz.ts"),
+  route("readyz", "routes/health/readyz.ts"),
   route("*", "routes/not-found.tsx"),
 ] satisfies RouteConfig;

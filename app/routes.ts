@@ -41,7 +41,5 @@ export default [
   // -- health --
   route("healthz", "routes/health/healthz.ts"),
   route("readyz", "routes/health/readyz.ts"),
-  route("healthz", "routes/health/healthz.ts"),
-  route("readyz", "routes/health/readyz.ts"),
   route("*", "routes/not-found.tsx"),
 ] satisfies RouteConfig;

@@ -6,7 +6,15 @@ import { ROOT } from "./paths.mjs";
 import { spawnChild } from "./processes.mjs";
 import { Refusal } from "./refusal.mjs";
 
-const SOURCES = ["app", "public", "package-lock.json", "react-router.config.ts", "vite.config.ts", "tsconfig.json"];
+const SOURCES = [
+  "app",
+  "public",
+  "package-lock.json",
+  "drizzle/migrations/meta/_journal.json",
+  "react-router.config.ts",
+  "vite.config.ts",
+  "tsconfig.json",
+];
 const STAMP = join("build", "sources.sha256");
 const IS_TEST = /\.test\.tsx?$/;
 

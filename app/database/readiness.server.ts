@@ -65,5 +65,7 @@ async function probeMigrations(connection: PoolConnection): Promise<Finding> {
   const applied = new Set(rows.map((row) => Number(row.created_at)));
   const missing = journal.entries.filter((entry) => !applied.delete(entry.when));
   if (missing.length > 0) return wrong(`Not applied yet: ${missing.map((entry) => entry.tag).join(", ")}.`);
-  return applied.size === 0 ? WELL : wrong(`The database is ${applied.size} migrations ahead of this build.`);
+  return applied.size === 0
+    ? WELL
+    : wrong(`The database has migrations that this build does not know: ${applied.size}.`);
 }

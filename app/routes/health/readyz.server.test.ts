@@ -47,6 +47,18 @@ test("names a migration that was not applied", async () => {
   }
 });
 
+test("says that the database is ahead of this build", async () => {
+  await connections().query("INSERT INTO __drizzle_migrations (hash, created_at) VALUES ('newer', 9999999999999)");
+  try {
+    expect((await readyz()).body.checks.migrations).toEqual({
+      ok: false,
+      why: "The database has migrations that this build does not know: 1.",
+    });
+  } finally {
+    await connections().query("DELETE FROM __drizzle_migrations WHERE hash = 'newer'");
+  }
+});
+
 test("says that the bucket cannot be reached", async () => {
   vi.spyOn(store, "probeBucket").mockRejectedValue(new Error("away"));
   expect((await readyz()).body.checks.bucket).toEqual({ ok: false, why: "The bucket cannot be reached." });

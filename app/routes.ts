@@ -5,7 +5,7 @@ export default [
   index("routes/home.ts"),
   // -- the office: signed-in people (routes/office.tsx checks who enters) --
   layout("routes/office.tsx", [
-    // desk
+    route("desk", "routes/desk/desk.tsx"),
     route("stars", "routes/stars/stars.tsx"),
     route("stars/new", "routes/stars/new.tsx"),
     route("stars/:record", "routes/stars/star.tsx"),
@@ -14,9 +14,19 @@ export default [
     route("sources/new", "routes/sources/new.tsx"),
     route("sources/:source", "routes/sources/source.tsx"),
     // intake
-    // exhibits, media
-    // reviews, editions, kiosks
-    // people, audit, mail, account, pattern book
+    route("exhibits", "routes/exhibits/exhibits.tsx"),
+    route("exhibits/new", "routes/exhibits/new.tsx"),
+    route("exhibits/:exhibit", "routes/exhibits/exhibit.tsx"),
+    route("exhibits/:exhibit/scenes/:scene", "routes/exhibits/scene.tsx"),
+    route("exhibits/:exhibit/scenes/:scene/still.png", "routes/exhibits/still.ts"),
+    // media
+    route("reviews", "routes/reviews/reviews.tsx"),
+    route("reviews/:exhibit", "routes/reviews/review.tsx"),
+    route("editions", "routes/editions/editions.tsx"),
+    route("editions/:exhibit", "routes/editions/exhibit-editions.tsx"),
+    route("kiosks", "routes/kiosks/kiosks.tsx"),
+    route("kiosks/new", "routes/kiosks/new.tsx"),
+    route("kiosks/:kiosk", "routes/kiosks/kiosk.tsx"),
     route("people", "routes/people/people.tsx"),
     route("people/:person", "routes/people/person.tsx"),
     route("audit", "routes/audit/audit.tsx"),

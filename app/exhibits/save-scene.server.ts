@@ -1,16 +1,10 @@
-import { z } from "zod";
+import type { z } from "zod";
 import type { Actor } from "#app/audit/actor.ts";
 import { change } from "#app/audit/change.server.ts";
 import { authorise } from "#app/people/authorise.ts";
 import { SceneDocument } from "#app/scene/document.ts";
-import { AddScene, version } from "./exhibit-input.ts";
 import { closeScene, openScene } from "./open-exhibit.server.ts";
-
-export const SaveScene = AddScene.omit({ exhibitId: true }).extend({
-  sceneId: z.string(),
-  version,
-  document: SceneDocument,
-});
+import type { SaveScene } from "./save-scene-input.ts";
 
 /** Titles and the scene document (scale, rings, view). */
 export async function saveScene(actor: Actor | null, input: z.output<typeof SaveScene>): Promise<void> {

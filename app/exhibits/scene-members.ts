@@ -1,24 +1,17 @@
-import type { SceneMember } from "#app/scene/layout.ts";
+import type { CastMember } from "#app/scene/member.ts";
 import type { SceneContent } from "./content.ts";
 
-/** The cast as the stage wants it. Members without a position or a distance cannot be placed and are left out. */
-export function sceneMembers(scene: SceneContent, language: "en" | "fr"): SceneMember[] {
-  return scene.cast.flatMap((member) => {
-    const { raDeg, decDeg, distancePc, regime } = member;
-    if (raDeg === null || decDeg === null || !distancePc || !regime) return [];
-    const name = member.name[language] ?? member.name.en;
-    return [
-      {
-        recordId: member.recordId,
-        name,
-        raDeg,
-        decDeg,
-        distancePc,
-        regime,
-        bv: member.bv,
-        vMag: member.vMag,
-        labelled: member.labelled,
-      },
-    ];
-  });
+/** The cast as the stage wants it; who has no place is told there with the reason. */
+export function sceneMembers(scene: SceneContent, language: "en" | "fr"): CastMember[] {
+  return scene.cast.map(({ recordId, name, labelled, raDeg, decDeg, distancePc, regime, bv, vMag }) => ({
+    recordId,
+    name: name[language] ?? name.en,
+    labelled,
+    raDeg,
+    decDeg,
+    distancePc,
+    regime,
+    bv,
+    vMag,
+  }));
 }

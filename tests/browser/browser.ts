@@ -1,7 +1,7 @@
 import { AxeBuilder } from "@axe-core/playwright";
 import { type Browser, type BrowserContext, type BrowserContextOptions, chromium, type Page } from "playwright-core";
-import { afterAll, afterEach, expect, inject } from "vitest";
-import { findProgram } from "#storage/paths.mjs";
+import { afterAll, afterEach, inject } from "vitest";
+import { CHROMIUM } from "#storage/test-packages.mjs";
 
 /** Without 3d interfaces a page sees what a kiosk without a GPU sees. */
 const ARGUMENTS = [
@@ -26,7 +26,7 @@ const contexts = new Set<BrowserContext>();
 const complaints: string[] = [];
 
 function launch(): Promise<Browser> {
-  browser ??= chromium.launch({ executablePath: findProgram("chromium") ?? "chromium", args: ARGUMENTS });
+  browser ??= chromium.launch({ executablePath: CHROMIUM, args: ARGUMENTS });
   return browser;
 }
 
@@ -69,13 +69,14 @@ export async function expectNoSeriousAxe(page: Page): Promise<void> {
   const found = violations
     .filter(({ impact }) => SERIOUS.has(impact ?? ""))
     .flatMap(({ id, help, nodes }) => nodes.map((node) => `${id}: ${help}: ${node.html.slice(0, 160)}`));
-  expect(found, `axe at ${page.url()}`).toEqual([]);
+  if (found.length > 0) throw new Error(`axe at ${page.url()}:\n${found.join("\n")}`);
 }
 
 afterEach(async () => {
   await Promise.all([...contexts].map((context) => context.close()));
   contexts.clear();
-  expect(complaints.splice(0), "what pages complained about").toEqual([]);
+  const heard = complaints.splice(0);
+  if (heard.length > 0) throw new Error(`What pages complained about:\n${heard.join("\n")}`);
 });
 
 afterAll(async () => {

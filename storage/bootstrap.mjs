@@ -26,11 +26,17 @@ export async function requirePackages({ owner, step }) {
   if (code !== 0) throw new Refusal(stepFailed("npm ci", code));
 }
 
-/** @param {Run} run */
-export async function requireMariadb(run) {
-  if (mariadbPrograms()) return;
-  if (!isRoot) throw new Refusal(mariadbMissing());
+/**
+ * @param {Run} run
+ * @param {{ find?: () => unknown, root?: boolean, install?: typeof installDebianPackages }} [machine] for the tests
+ */
+export async function requireMariadb(
+  run,
+  { find = mariadbPrograms, root = isRoot, install = installDebianPackages } = {},
+) {
+  if (find()) return;
+  if (!root) throw new Refusal(mariadbMissing());
   console.log("Installing MariaDB ...");
-  await installDebianPackages(["mariadb-server"], run);
-  if (!mariadbPrograms()) throw new Refusal(mariadbMissing());
+  await install(["mariadb-server"], run);
+  if (!find()) throw new Refusal(mariadbMissing());
 }

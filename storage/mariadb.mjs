@@ -13,6 +13,9 @@ import { keptSecret } from "./secrets.mjs";
 /** Unix sockets refuse longer paths, and MariaDB then aborts without a good word. */
 const LONGEST_SOCKET_PATH = 100;
 
+/** The several ways in which MariaDB says ENOSPC. */
+const DISK_FULL = /no space left|(errno|error|errcode):? 28\b|disk is full/i;
+
 /**
  * @typedef {object} Mariadb
  * @property {string} url DATABASE_URL of the application's user
@@ -104,10 +107,11 @@ function installDatabase(program, data, owner) {
   if (result.status === 0) return;
   rmSync(data, { recursive: true, force: true });
   const said = `${result.stderr ?? ""}${result.stdout ?? ""}`;
-  if (/no space|errno: 28|error: 28/i.test(said)) {
+  if (DISK_FULL.test(said)) {
     throw new Refusal(diskFull("creating the database"));
   }
-  throw new Error(`${program} failed: ${said.trim().split("\n").slice(-5).join(" ")}`);
+  const errors = said.split("\n").filter((line) => line.includes("ERROR"));
+  throw new Error(`${program} failed: ${(errors.length > 0 ? errors : [said.trim()]).join("\n")}`);
 }
 
 /** @param {{ data: string, socket: string, port: number, folder: string, durable: boolean }} at */
@@ -155,7 +159,7 @@ async function untilReady(child, client, socket, folder) {
   }
   const tail = readFileSync(join(folder, "mariadb.log"), "utf8").trim().split("\n").slice(-15).join("\n");
   await endChild(child, 0);
-  if (/no space left|errno: 28|error: 28|Errcode: 28/i.test(tail)) {
+  if (DISK_FULL.test(tail)) {
     throw new Refusal(diskFull("starting the database"));
   }
   throw new Error(`MariaDB did not start. The end of its log:\n${tail}`);

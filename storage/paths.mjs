@@ -1,4 +1,4 @@
-import { existsSync } from "node:fs";
+import { accessSync, constants } from "node:fs";
 import { delimiter, dirname, join, resolve } from "node:path";
 import { fileURLToPath } from "node:url";
 
@@ -19,10 +19,20 @@ const SERVER_FOLDERS = ["/usr/sbin", "/usr/local/sbin", "/sbin", "/usr/bin", "/u
 export function findProgram(...names) {
   const folders = [...(process.env.PATH ?? "").split(delimiter), ...SERVER_FOLDERS].filter(Boolean);
   for (const name of names) {
-    const folder = folders.find((candidate) => existsSync(join(candidate, name)));
+    const folder = folders.find((candidate) => isExecutable(join(candidate, name)));
     if (folder) return join(folder, name);
   }
   return null;
+}
+
+/** @param {string} path */
+function isExecutable(path) {
+  try {
+    accessSync(path, constants.X_OK);
+    return true;
+  } catch {
+    return false;
+  }
 }
 
 export const isRoot = process.getuid?.() === 0;

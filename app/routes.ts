@@ -48,6 +48,7 @@ export default [
   // -- feeds, pictures, kiosks: anybody --
   route("feed/:exhibit.json", "routes/feed/feed.ts"),
   route("stills/:digest.png", "routes/feed/still.ts"),
+  route("k/:kiosk", "routes/kiosk/kiosk.tsx"),
   // -- health --
   route("healthz", "routes/health/healthz.ts"),
   route("readyz", "routes/health/readyz.ts"),

@@ -5,8 +5,8 @@ import { registerConsequence } from "#app/audit/consequences.server.ts";
 import { db } from "#app/database/db.server.ts";
 import { auditEntry } from "#app/database/schema/audit.ts";
 import { outbox } from "#app/database/schema/jobs.ts";
-import { sendMail } from "#app/mail/send-mail.server.ts";
 import { readCaughtMail } from "#app/mail/read-caught-mail.server.ts";
+import { sendMail } from "#app/mail/send-mail.server.ts";
 import { drainOutbox, MOST_ATTEMPTS } from "./drain-outbox.server.ts";
 
 const actor = { personId: "", name: "Test", email: "t@tern.example", roles: [], sessionId: null, requestId: "r" };
@@ -70,7 +70,10 @@ test("mail that is down is tried again later, and given up in the end", async ()
     .set({ attempts: MOST_ATTEMPTS - 1, availableAt: new Date(0) })
     .where(eq(outbox.id, row?.id ?? ""));
   await drainOutbox({ mail: down });
-  const [givenUp] = await db().select().from(outbox).where(eq(outbox.id, row?.id ?? ""));
+  const [givenUp] = await db()
+    .select()
+    .from(outbox)
+    .where(eq(outbox.id, row?.id ?? ""));
   expect(givenUp?.failedAt).not.toBeNull();
 });
 

@@ -7,7 +7,6 @@ export interface GateFacts {
   positionEpoch: string | null;
   positionSourceId: string | null;
   positionLocator: string | null;
-  positionNote: string | null;
   adopted: (AdoptedParallax & Cited & { fromMemory: boolean }) | null;
   adoptedReason: string | null;
   regime: "firm" | "wide" | "prior-led" | null;
@@ -34,11 +33,6 @@ export function missingForVetting(facts: GateFacts): Missing[] {
     ["positionEpoch", facts.positionEpoch === null, "The epoch of the position is missing."],
     ["positionSource", facts.positionSourceId === null, "The source of the position is missing."],
     ["positionLocator", facts.positionLocator === null, "Where in its source the position stands is missing."],
-    [
-      "positionNote",
-      /from memory/i.test(facts.positionNote ?? ""),
-      "The position is from memory: compare it with its source and change its note.",
-    ],
     ["adopted", facts.adopted === null, "No parallax is adopted."],
     ["adoptedReason", facts.adopted !== null && !facts.adoptedReason, "Why this parallax is adopted is missing."],
   ];

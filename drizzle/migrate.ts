@@ -1,15 +1,15 @@
 import { drizzle } from "drizzle-orm/mysql2";
 import { migrate } from "drizzle-orm/mysql2/migrator";
-import mysql from "mysql2/promise";
+import type { RowDataPacket } from "mysql2/promise";
 import { takeLocalEnvironment } from "#storage/local-environment.mjs";
+import { connectOrExplain } from "./connect.ts";
 
 // npm run db:migrate: brings the database to the newest migration. Two that start at once take turns.
 const WAIT_SECONDS = 60;
 
-takeLocalEnvironment();
-const connection = await mysql.createConnection({ uri: process.env.DATABASE_URL, timezone: "Z" });
+const connection = await connectOrExplain(takeLocalEnvironment());
 try {
-  const [rows] = await connection.query<mysql.RowDataPacket[]>("SELECT GET_LOCK('alidade_migrate', ?) AS taken", [
+  const [rows] = await connection.query<RowDataPacket[]>("SELECT GET_LOCK('alidade_migrate', ?) AS taken", [
     WAIT_SECONDS,
   ]);
   if (rows[0]?.taken !== 1) throw new Error("Another migration of this database does not end.");

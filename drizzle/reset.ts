@@ -1,9 +1,8 @@
-import mysql from "mysql2/promise";
 import { isLocalDatabase, takeLocalEnvironment } from "#storage/local-environment.mjs";
+import { connectOrExplain } from "./connect.ts";
 
 // npm run db:reset: empties the local database and migrates it again. Everything in it is lost, so it wants a yes.
-takeLocalEnvironment();
-const url = new URL(process.env.DATABASE_URL ?? "");
+const url = new URL(takeLocalEnvironment());
 const name = url.pathname.slice(1);
 if (!isLocalDatabase(url.href) || !/^app(_\w+)?$/.test(name)) {
   console.error(`This only empties the database of this machine, not ${name} on ${url.hostname}.`);
@@ -15,7 +14,7 @@ if (process.env.ALIDADE_RESET !== "yes" && !process.argv.includes("--yes")) {
 }
 const server = new URL(url);
 server.pathname = "";
-const connection = await mysql.createConnection(server.href);
+const connection = await connectOrExplain(server.href);
 await connection.query(`DROP DATABASE IF EXISTS \`${name}\``);
 await connection.query(`CREATE DATABASE \`${name}\``);
 await connection.end();

@@ -2,7 +2,6 @@ import "./dot-env.mjs";
 import { existsSync, readFileSync, renameSync, rmSync, writeFileSync } from "node:fs";
 import { join } from "node:path";
 import { VAR } from "./paths.mjs";
-import { Refusal } from "./refusal.mjs";
 
 const file = (/** @type {string} */ folder) => join(folder, "environment.json");
 
@@ -20,6 +19,7 @@ export function removeEnvironment(folder) {
 /**
  * For db:migrate, db:seed and db:reset: what the environment does not say comes from the stack that runs here.
  * @param {string} [folder]
+ * @returns {string} DATABASE_URL
  */
 export function takeLocalEnvironment(folder = VAR) {
   if (existsSync(file(folder))) {
@@ -27,11 +27,10 @@ export function takeLocalEnvironment(folder = VAR) {
       process.env[name] ??= String(value);
     }
   }
-  if (!process.env.DATABASE_URL) {
-    throw new Refusal(
-      "There is no database to work on: run npm start (or npm run dev) beside this, or set DATABASE_URL.",
-    );
-  }
+  const { DATABASE_URL } = process.env;
+  if (DATABASE_URL) return DATABASE_URL;
+  console.error("There is no database to work on: run npm start (or npm run dev) beside this, or set DATABASE_URL.");
+  process.exit(1);
 }
 
 /** Whether a database is this machine's own; demo and reset refuse any other. @param {string} url */

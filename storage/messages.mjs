@@ -19,6 +19,15 @@ export const aptFailed = (packages, said) =>
 export const portInUse = (port, host, holder) =>
   `Port ${port} on ${host} is in use${holder ? ` by ${holder}` : ""}; stop that, or choose another port: PORT=${port + 1} npm start`;
 
+/** @param {number} port @param {string} host @param {string} code */
+export const cannotListen = (port, host, code) =>
+  code === "EACCES"
+    ? `This user may not listen on port ${port}; choose one from 1024 up: PORT=4310 npm start`
+    : `Nothing can listen on ${host} here (${code}); set HOST to an address of this machine, or leave it unset.`;
+
+/** @param {string} url @param {string} log */
+export const doesNotAnswer = (url, log) => `The web server does not answer at ${url}. Its log says why: ${log}`;
+
 /** @param {string} folder @param {string} why */
 export const cannotWrite = (folder, why) =>
   `This user cannot write to ${folder} (${why}); give it the right to, or set ALIDADE_VAR to a folder of its own.`;

@@ -12,9 +12,17 @@ export async function freePort(preferred = 0) {
 
 /** @param {number} port @param {string} [host] */
 export async function isFree(port, host = "127.0.0.1") {
+  return (await whyNotFree(port, host)) === null;
+}
+
+/**
+ * @param {number} port @param {string} host
+ * @returns {Promise<string | null>} null when one can listen there; otherwise the code of the error, such as "EADDRINUSE"
+ */
+export async function whyNotFree(port, host) {
   return listenBriefly(port, host).then(
-    () => true,
-    () => false,
+    () => null,
+    (error) => String(error.code),
   );
 }
 

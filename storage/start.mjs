@@ -4,17 +4,17 @@ import { join } from "node:path";
 import { readAddress } from "./address.mjs";
 import { requireMariadb, requireNode, requirePackages } from "./bootstrap.mjs";
 import { requireBuild } from "./build.mjs";
-import { loadDemo, migrateDatabase } from "./database-steps.mjs";
 import { leaveEnvironment, removeEnvironment } from "./local-environment.mjs";
 import { giveLockBack, takeLock } from "./lock.mjs";
-import { alreadyRuns, keepsStopping, portInUse } from "./messages.mjs";
+import { alreadyRuns, cannotListen, keepsStopping, portInUse } from "./messages.mjs";
 import { VAR } from "./paths.mjs";
 import { portHolder } from "./port-holder.mjs";
-import { isFree } from "./ports.mjs";
+import { whyNotFree } from "./ports.mjs";
 import { endMarked } from "./processes.mjs";
 import { asRefusal, Refusal } from "./refusal.mjs";
 import { keptSecret } from "./secrets.mjs";
 import { startServices, wantsOwn } from "./services.mjs";
+import { checkEnvironment, loadDemo, migrateDatabase } from "./steps.mjs";
 import { supervise } from "./supervise.mjs";
 import { prepareVarFolder } from "./var-folder.mjs";
 import { startWeb, startWorker } from "./web.mjs";
@@ -63,7 +63,9 @@ async function claim({ host, port, url }) {
   locked = true;
   const ended = await endMarked(VAR);
   if (ended > 0) console.log(`Ended ${ended} processes that an earlier start left behind.`);
-  if (!(await isFree(port, host))) throw new Refusal(portInUse(port, host, portHolder(port)));
+  const why = await whyNotFree(port, host);
+  if (why === "EADDRINUSE") throw new Refusal(portInUse(port, host, portHolder(port)));
+  if (why) throw new Refusal(cannotListen(port, host, why));
 }
 
 /** @param {Record<string, string>} services @param {string} url @returns {Record<string, string>} */
@@ -96,6 +98,7 @@ async function main() {
   const env = environmentOfApplication(await startServices(supervisor, VAR), address.url);
   leaveEnvironment(VAR, env);
   if (flags.has("--services-only")) return console.log("The services run.");
+  await checkEnvironment(run, env);
   if (!dev) await requireBuild(run);
   await migrateDatabase(run, env);
   if (wantsOwn().database && !flags.has("--no-demo")) await loadDemo(run, env);

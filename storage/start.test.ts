@@ -228,6 +228,14 @@ test("a port in use is refused: by whom, and how to choose another", async () =>
   await new Promise((closed) => server.close(closed));
 });
 
+test("an address that is not of this machine is refused by name", async () => {
+  const { code, said } = await endOf(start(ownFolder(), { HOST: "192.0.2.1", PORT: String(await freePort()) }));
+  expect(code).toBe(1);
+  expect(said).toBe(
+    "Nothing can listen on 192.0.2.1 here (EADDRNOTAVAIL); set HOST to an address of this machine, or leave it unset.",
+  );
+});
+
 test("a PATH without /usr/sbin finds MariaDB all the same", async () => {
   const started = await running(ownFolder(), { PATH: "/usr/bin:/bin" });
   started.child.kill();

@@ -33,7 +33,7 @@ const program = (...path) => join(ROOT, "node_modules", ...path);
 async function check(name, commands) {
   const began = Date.now();
   let ok = true;
-  for (const command of commands) ok = ok && (await run(command)) === 0;
+  for (const command of commands) ok = (await run(command)) === 0 && ok;
   console.log(`${ok ? "passed" : "FAILED"}: ${name} (${Math.round((Date.now() - began) / 1000)} s)`);
   return { passed: ok ? 1 : 0, failed: ok ? 0 : 1, skipped: 0 };
 }
@@ -52,7 +52,8 @@ const typecheck = () =>
 
 /** @param {{ browser: boolean, references: boolean }} without */
 async function vitest(without) {
-  const projects = ["unit", "server", "reference", ...(without.browser ? [] : ["browser"])];
+  const all = ["unit", "server", "reference", ...(without.browser ? [] : ["browser"])];
+  const projects = argumentsForVitest.some((argument) => argument.startsWith("--project")) ? [] : all;
   const args = [
     program("vitest", "vitest.mjs"),
     "run",

@@ -1,9 +1,11 @@
 import { existsSync } from "node:fs";
 import { join } from "node:path";
 import { setTimeout as pause } from "node:timers/promises";
-import { typescript } from "./database-steps.mjs";
+import { doesNotAnswer } from "./messages.mjs";
 import { ROOT } from "./paths.mjs";
-import { hasEnded, spawnChild } from "./processes.mjs";
+import { spawnChild } from "./processes.mjs";
+import { Refusal } from "./refusal.mjs";
+import { typescript } from "./steps.mjs";
 
 const WEB_GRACE_MS = 1200;
 
@@ -11,12 +13,9 @@ const WEB_GRACE_MS = 1200;
 
 /** @param {import("./services.mjs").Supervisor} supervisor @param {Web} web */
 export async function startWeb(supervisor, web) {
-  const part = await supervisor.add(
-    "web server",
-    async () => ({ process: web.dev ? spawnDev(web) : spawnServe(web) }),
-    WEB_GRACE_MS,
-  );
-  await untilItAnswers(part.process, web);
+  const start = async () => ({ process: web.dev ? spawnDev(web) : spawnServe(web) });
+  await supervisor.add("web server", start, WEB_GRACE_MS);
+  await untilItAnswers(supervisor, web);
 }
 
 /** @param {Web} web */
@@ -38,18 +37,18 @@ function spawnDev({ owner, env, host, port }) {
   return spawnChild(process.execPath, args, { owner, cwd: ROOT, env: { ...env, ALIDADE_VITE_CACHE: cache } });
 }
 
-/** @param {import("node:child_process").ChildProcess} child @param {Web} web */
-async function untilItAnswers(child, { host, port }) {
+/** A server that dies meanwhile is started again, or ends everything: that is the supervisor's to say. @param {import("./services.mjs").Supervisor} supervisor @param {Web} web */
+async function untilItAnswers(supervisor, { owner, host, port }) {
   const address = host === "0.0.0.0" || host === "::" ? "127.0.0.1" : host;
   const url = `http://${address.includes(":") ? `[${address}]` : address}:${port}/healthz`;
-  const deadline = Date.now() + 60_000;
-  while (Date.now() < deadline) {
-    if (hasEnded(child)) return;
+  const deadline = Date.now() + 90_000;
+  while (!supervisor.stopping) {
     const answered = await fetch(url, { signal: AbortSignal.timeout(5000) }).then(
       () => true,
       () => false,
     );
     if (answered) return;
+    if (Date.now() > deadline) throw new Refusal(doesNotAnswer(url, join(owner, "logs", "web.log")));
     await pause(100);
   }
 }

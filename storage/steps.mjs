@@ -9,16 +9,20 @@ import { Refusal } from "./refusal.mjs";
 export const typescript = (...program) => ["--import", "tsx", join(ROOT, ...program)];
 
 /**
- * @param {string} name @param {string} file @param {import("./bootstrap.mjs").Run} run
+ * @param {string} name @param {string[]} program @param {import("./bootstrap.mjs").Run} run
  * @param {Record<string, string>} env
  */
-async function runStep(name, file, { owner, step }, env) {
-  const code = await step(spawnChild(process.execPath, typescript("drizzle", file), { owner, cwd: ROOT, env }));
+async function runStep(name, program, { owner, step }, env) {
+  const code = await step(spawnChild(process.execPath, typescript(...program), { owner, cwd: ROOT, env }));
   if (code !== 0) throw new Refusal(stepFailed(name, code));
 }
 
 /** @param {import("./bootstrap.mjs").Run} run @param {Record<string, string>} env */
-export const migrateDatabase = (run, env) => runStep("The migration", "migrate.ts", run, env);
+export const checkEnvironment = (run, env) =>
+  runStep("Reading the environment", ["storage", "check-environment.ts"], run, env);
+
+/** @param {import("./bootstrap.mjs").Run} run @param {Record<string, string>} env */
+export const migrateDatabase = (run, env) => runStep("The migration", ["drizzle", "migrate.ts"], run, env);
 
 /**
  * Loads the demo into a database in which nobody is yet. A demo that was interrupted is begun again from nothing:
@@ -29,11 +33,11 @@ export async function loadDemo(run, env) {
   if (!existsSync(join(ROOT, "drizzle", "seed.ts"))) return;
   const unfinished = join(run.owner, "demo-unfinished");
   if (existsSync(unfinished))
-    await runStep("Emptying the unfinished demo", "reset.ts", run, { ...env, ALIDADE_RESET: "yes" });
+    await runStep("Emptying the unfinished demo", ["drizzle", "reset.ts"], run, { ...env, ALIDADE_RESET: "yes" });
   if (!(await hasNobody(env.DATABASE_URL ?? ""))) return;
   console.log("Loading the demo ...");
   writeFileSync(unfinished, new Date().toISOString());
-  await runStep("Loading the demo", "seed.ts", run, env);
+  await runStep("Loading the demo", ["drizzle", "seed.ts"], run, env);
   rmSync(unfinished, { force: true });
 }
 

@@ -15,6 +15,10 @@ export default defineConfig({
   cacheDir: process.env.ALIDADE_VITE_CACHE ?? "node_modules/.vite",
   resolve: { tsconfigPaths: true },
   ssr: { noExternal: ["@react-three/fiber"] },
+  // Found only behind lazy imports otherwise, and a second pass would load React twice in the development server.
+  optimizeDeps: {
+    include: ["@dnd-kit/core", "@dnd-kit/sortable", "@dnd-kit/utilities", "@react-three/fiber", "three", "opentype.js"],
+  },
   server: { host: "127.0.0.1" },
   test: {
     passWithNoTests: false,

@@ -1,7 +1,7 @@
 import { eq } from "drizzle-orm";
-import { ulid } from "ulid";
 import type { Actor } from "#app/audit/actor.ts";
 import { type Change, change } from "#app/audit/change.server.ts";
+import { newId } from "#app/database/new-id.ts";
 import { measurement, source } from "#app/database/schema/catalogue.ts";
 import { Invalid } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
@@ -32,7 +32,7 @@ async function insertMeasurement(c: Change, input: NewMeasurement): Promise<stri
     const [known] = await c.tx.select({ id: source.id }).from(source).where(eq(source.id, input.sourceId));
     if (!known) throw new Invalid({ sourceId: ["There is no such source."] });
   }
-  const id = ulid();
+  const id = newId();
   await c.tx.insert(measurement).values({ id, ...measurementColumns(input, c.actor.personId) });
   c.audit({
     objectType: "record",

@@ -1,7 +1,7 @@
-import { ulid } from "ulid";
 import type { z } from "zod";
 import type { Actor } from "#app/audit/actor.ts";
 import { type Change, change } from "#app/audit/change.server.ts";
+import { newId } from "#app/database/new-id.ts";
 import { record } from "#app/database/schema/catalogue.ts";
 import { authorise } from "#app/people/authorise.ts";
 import type { CreateRecord } from "./record-input.ts";
@@ -28,7 +28,7 @@ export function recordColumns(input: NewRecord) {
 
 /** Writes a record inside a change; also how intake writes them. @throws Invalid at `identifiers` */
 export async function insertRecord(c: Change, input: NewRecord): Promise<string> {
-  const recordId = ulid();
+  const recordId = newId();
   await c.tx.insert(record).values({ id: recordId, ...recordColumns(input), createdBy: c.actor.personId });
   await writeNames(c, recordId, input);
   c.audit({ objectType: "record", objectId: recordId, objectName: input.name, after: input });

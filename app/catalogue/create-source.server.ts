@@ -1,8 +1,8 @@
-import { ulid } from "ulid";
 import type { z } from "zod";
 import type { Actor } from "#app/audit/actor.ts";
 import { change } from "#app/audit/change.server.ts";
 import { duplicateKey } from "#app/database/database-error.ts";
+import { newId } from "#app/database/new-id.ts";
 import { source } from "#app/database/schema/catalogue.ts";
 import { Invalid } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
@@ -19,7 +19,7 @@ export function refuseDuplicateSource(error: unknown): never {
 
 export async function createSource(actor: Actor | null, input: z.output<typeof CreateSource>): Promise<string> {
   authorise(actor, "source.write");
-  const sourceId = ulid();
+  const sourceId = newId();
   await change(actor, "catalogue.create-source", async (c) => {
     await c.tx.insert(source).values({ id: sourceId, ...input, createdBy: actor.personId });
     c.audit({ objectType: "source", objectId: sourceId, objectName: shortCitation(input), after: input });

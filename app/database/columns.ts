@@ -1,5 +1,5 @@
 import { customType, datetime, int, varchar } from "drizzle-orm/mysql-core";
-import { ulid } from "ulid";
+import { newId } from "./new-id.ts";
 
 const asciiId = customType<{ data: string; driverData: string }>({
   dataType: () => "varchar(26) character set ascii collate ascii_bin",
@@ -22,7 +22,7 @@ const exactText = (length: number) =>
 export const id = () =>
   asciiId("id")
     .primaryKey()
-    .$defaultFn(() => ulid());
+    .$defaultFn(() => newId());
 
 /** A column that holds another row's id. */
 export const ref = (name: string) => asciiId(name);

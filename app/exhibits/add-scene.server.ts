@@ -1,8 +1,8 @@
 import { eq, sql } from "drizzle-orm";
-import { ulid } from "ulid";
 import type { z } from "zod";
 import type { Actor } from "#app/audit/actor.ts";
 import { change } from "#app/audit/change.server.ts";
+import { newId } from "#app/database/new-id.ts";
 import { exhibit, scene } from "#app/database/schema/exhibits.ts";
 import { authorise } from "#app/people/authorise.ts";
 import { SceneDocument } from "#app/scene/document.ts";
@@ -24,7 +24,7 @@ export async function addScene(actor: Actor | null, input: z.output<typeof AddSc
       .from(scene)
       .where(eq(scene.exhibitId, found.id));
     const added = {
-      id: ulid(),
+      id: newId(),
       exhibitId: found.id,
       position: Number(last?.position ?? 0) + 1,
       titleEn: input.titleEn,

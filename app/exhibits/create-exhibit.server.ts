@@ -1,8 +1,8 @@
-import { ulid } from "ulid";
 import type { z } from "zod";
 import type { Actor } from "#app/audit/actor.ts";
 import { change } from "#app/audit/change.server.ts";
 import { duplicateKey } from "#app/database/database-error.ts";
+import { newId } from "#app/database/new-id.ts";
 import { exhibit } from "#app/database/schema/exhibits.ts";
 import { Invalid } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
@@ -12,7 +12,7 @@ import { noteContributor } from "./open-exhibit.server.ts";
 /** @throws Invalid at `slug` when another exhibit has this address. */
 export async function createExhibit(actor: Actor | null, input: z.output<typeof CreateExhibit>): Promise<string> {
   authorise(actor, "exhibit.write");
-  const exhibitId = ulid();
+  const exhibitId = newId();
   try {
     await change(actor, "exhibit.create", async (c) => {
       await c.tx.insert(exhibit).values({ id: exhibitId, ...input, createdBy: actor.personId });

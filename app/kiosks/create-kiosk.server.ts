@@ -1,8 +1,8 @@
-import { ulid } from "ulid";
 import type { z } from "zod";
 import type { Actor } from "#app/audit/actor.ts";
 import { change } from "#app/audit/change.server.ts";
 import { duplicateKey } from "#app/database/database-error.ts";
+import { newId } from "#app/database/new-id.ts";
 import { kiosk } from "#app/database/schema/kiosks.ts";
 import { Invalid } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
@@ -11,7 +11,7 @@ import type { CreateKiosk } from "./kiosk-input.ts";
 /** @throws Invalid at `slug` when another kiosk has this address. */
 export async function createKiosk(actor: Actor | null, input: z.output<typeof CreateKiosk>): Promise<string> {
   authorise(actor, "kiosk.manage");
-  const kioskId = ulid();
+  const kioskId = newId();
   try {
     await change(actor, "kiosk.create", async (c) => {
       await c.tx.insert(kiosk).values({ id: kioskId, ...input });

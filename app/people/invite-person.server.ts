@@ -1,8 +1,8 @@
-import { ulid } from "ulid";
 import type { z } from "zod";
 import type { Actor } from "#app/audit/actor.ts";
 import { type Change, change } from "#app/audit/change.server.ts";
 import { duplicateKey } from "#app/database/database-error.ts";
+import { newId } from "#app/database/new-id.ts";
 import { person, personRole } from "#app/database/schema/people.ts";
 import { Invalid, Locked } from "#app/errors.ts";
 import { authorise } from "./authorise.ts";
@@ -27,7 +27,7 @@ async function mailInvitation(c: Change, to: { id: string; name: string; email: 
 /** @throws Invalid at `email` when somebody has this address already */
 export async function invitePerson(actor: Actor | null, input: z.output<typeof InvitePerson>): Promise<string> {
   authorise(actor, "people.manage");
-  const personId = ulid();
+  const personId = newId();
   const { email, name, roles } = input;
   try {
     await change(actor, "people.invite", async (c) => {

@@ -1,8 +1,8 @@
 import { and, eq, gt, isNull } from "drizzle-orm";
-import { ulid } from "ulid";
 import type { Change } from "#app/audit/change.server.ts";
 import { db } from "#app/database/db.server.ts";
 import type { LinkPurpose } from "#app/database/enums.ts";
+import { newId } from "#app/database/new-id.ts";
 import { oneTimeLink, person } from "#app/database/schema/people.ts";
 import { env } from "#app/env.server.ts";
 import { NotFound } from "#app/errors.ts";
@@ -26,7 +26,7 @@ export async function makeLink(c: Change, personId: string, purpose: LinkPurpose
   const token = newToken();
   const { ms, words, path } = LIFETIME[purpose];
   const expiresAt = new Date(now.getTime() + ms);
-  await c.tx.insert(oneTimeLink).values({ id: ulid(), tokenHash: tokenHash(token), personId, purpose, expiresAt });
+  await c.tx.insert(oneTimeLink).values({ id: newId(), tokenHash: tokenHash(token), personId, purpose, expiresAt });
   return { url: `${env().PUBLIC_URL}/${path}/${token}`, lasts: words };
 }
 

@@ -1,9 +1,9 @@
 import { eq } from "drizzle-orm";
-import { ulid } from "ulid";
 import type { z } from "zod";
 import type { Actor } from "#app/audit/actor.ts";
 import { change } from "#app/audit/change.server.ts";
 import { db } from "#app/database/db.server.ts";
+import { newId } from "#app/database/new-id.ts";
 import { person, personRole, session } from "#app/database/schema/people.ts";
 import { Invalid } from "#app/errors.ts";
 import type { SignIn } from "./input.ts";
@@ -53,7 +53,7 @@ async function openSession(actor: Actor, visitor: Visitor): Promise<{ token: str
   const expiresAt = new Date(now.getTime() + ABSOLUTE_MS);
   await change(actor, "people.sign-in", async (c) => {
     await c.tx.insert(session).values({
-      id: ulid(),
+      id: newId(),
       tokenHash: tokenHash(token),
       personId: actor.personId,
       lastSeenAt: now,

@@ -1,6 +1,6 @@
-import { ulid } from "ulid";
 import type { Actor, Role } from "#app/audit/actor.ts";
 import { change } from "#app/audit/change.server.ts";
+import { newId } from "#app/database/new-id.ts";
 import { person, personRole } from "#app/database/schema/people.ts";
 import { hashPassword } from "#app/people/password.server.ts";
 
@@ -34,7 +34,7 @@ export async function openAccounts(): Promise<Team> {
   const team: Partial<Team> = {};
   await change(NOBODY, "seed.open-accounts", async (c) => {
     for (const { key, name, email, roles } of ACCOUNTS) {
-      const personId = ulid();
+      const personId = newId();
       await c.tx.insert(person).values({ id: personId, name, email, state: "active", passwordHash });
       await c.tx.insert(personRole).values(roles.map((role) => ({ personId, role })));
       c.audit({ objectType: "person", objectId: personId, objectName: name, after: { name, email, roles } });

@@ -1,4 +1,3 @@
-import { ulid } from "ulid";
 import type { Actor } from "#app/audit/actor.ts";
 import { addMeasurement } from "#app/catalogue/add-measurement.server.ts";
 import { adoptParallax } from "#app/catalogue/adopt-parallax.server.ts";
@@ -8,13 +7,14 @@ import { AddMeasurement } from "#app/catalogue/measurement-input.ts";
 import { AdoptParallax, CreateRecord } from "#app/catalogue/record-input.ts";
 import { CreateSource } from "#app/catalogue/source-input.ts";
 import { vetRecord } from "#app/catalogue/vet-record.server.ts";
+import { newId } from "#app/database/new-id.ts";
 import { parseInput } from "#app/parse-input.ts";
 
 let count = 0;
 
 /** A source with a DOI of its own. */
 export async function makeSource(actor: Actor, overrides: Record<string, unknown> = {}): Promise<string> {
-  const doi = `10.9999/${ulid()}`;
+  const doi = `10.9999/${newId()}`;
   return createSource(
     actor,
     parseInput(CreateSource, { title: "A table", authors: "Tern, A.", year: "2020", doi, ...overrides }),

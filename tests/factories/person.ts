@@ -1,12 +1,12 @@
-import { ulid } from "ulid";
 import type { Actor, Role } from "#app/audit/actor.ts";
 import { db } from "#app/database/db.server.ts";
+import { newId } from "#app/database/new-id.ts";
 import { person, personRole } from "#app/database/schema/people.ts";
 
 /** An active person with roles, straight into the database; no password, so nobody can sign in as them. */
 export async function makePerson(overrides: Partial<typeof person.$inferInsert> & { roles?: Role[] } = {}) {
   const { roles = [], ...columns } = overrides;
-  const id = ulid();
+  const id = newId();
   const row = {
     id,
     name: `Person ${id}`,

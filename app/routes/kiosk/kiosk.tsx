@@ -160,7 +160,7 @@ function Shown({ edition, language, resets, startAgain, onTurn }: ShownProps) {
             controls="kiosk"
             className="grow"
           />
-          <p className="px-8 py-2 text-sm text-ink-soft">{claimsSentence(scene.claims, language)}</p>
+          <p className="sr-only">{claimsSentence(scene.claims, language)}</p>
         </div>
         <div className="grid content-start gap-8 border-rule px-8 py-6 landscape:border-l portrait:grid-cols-2 portrait:border-t">
           <StarCard member={selected} language={language} onHow={() => setAsks(true)} />

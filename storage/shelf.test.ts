@@ -14,7 +14,7 @@ afterEach(() => {
 /** Cruises a checkout that holds these files. @returns its exit code and "rule: from -> to" of each violation */
 function cruise(files: Record<string, string>) {
   mkdirSync(VAR, { recursive: true });
-  const root = mkdtempSync(join(VAR, "shelf-"));
+  const root = mkdtempSync(join(VAR, `test-shelf-${process.pid}-`));
   folders.push(root);
   for (const name of ["package.json", "tsconfig.json", ".dependency-cruiser.mjs"])
     cpSync(join(ROOT, name), join(root, name));

@@ -18,7 +18,7 @@ const folders: string[] = [];
 
 function ownFolder() {
   mkdirSync(VAR, { recursive: true });
-  const folder = mkdtempSync(join(VAR, "start-"));
+  const folder = mkdtempSync(join(VAR, `test-start-${process.pid}-`));
   folders.push(folder);
   return folder;
 }

@@ -1,4 +1,4 @@
-import { existsSync, rmSync, writeFileSync } from "node:fs";
+import { existsSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import { join } from "node:path";
 import { stepFailed } from "./messages.mjs";
 import { ROOT } from "./paths.mjs";
@@ -10,10 +10,12 @@ export const typescript = (...program) => ["--import", "tsx", join(ROOT, ...prog
 
 /**
  * @param {string} name @param {string[]} program @param {import("./bootstrap.mjs").Run} run
- * @param {Record<string, string>} env
+ * @param {Record<string, string>} env @param {string} [log] takes what it says; shown when it fails
  */
-async function runStep(name, program, { owner, step }, env) {
-  const code = await step(spawnChild(process.execPath, typescript(...program), { owner, cwd: ROOT, env }));
+async function runStep(name, program, { owner, step }, env, log) {
+  if (log) rmSync(log, { force: true });
+  const code = await step(spawnChild(process.execPath, typescript(...program), { owner, cwd: ROOT, env, log }));
+  if (code !== 0 && log) console.error(readFileSync(log, "utf8").trim());
   if (code !== 0) throw new Refusal(stepFailed(name, code));
 }
 
@@ -37,7 +39,7 @@ export async function loadDemo(run, env) {
   if (!(await hasNobody(env.DATABASE_URL ?? ""))) return;
   console.log("Loading the demo ...");
   writeFileSync(unfinished, new Date().toISOString());
-  await runStep("Loading the demo", ["drizzle", "seed.ts"], run, env);
+  await runStep("Loading the demo", ["drizzle", "seed.ts"], run, env, join(run.owner, "logs", "demo.log"));
   rmSync(unfinished, { force: true });
 }
 

@@ -7,6 +7,7 @@ import { ROOT, VAR } from "./paths.mjs";
 import { spawnChild } from "./processes.mjs";
 import { asRefusal, Refusal } from "./refusal.mjs";
 import { supervise } from "./supervise.mjs";
+import { sweepTests } from "./sweep.mjs";
 import { requireTestPackages } from "./test-packages.mjs";
 import { prepareVarFolder } from "./var-folder.mjs";
 
@@ -19,8 +20,15 @@ const SUMMARY = process.env.ALIDADE_TEST_SUMMARY;
 const argumentsForVitest = process.argv.slice(2);
 
 const { step, stop } = supervise(OWNER, () => {});
+let interrupted = false;
 for (const signal of /** @type {const} */ (["SIGINT", "SIGTERM", "SIGHUP"])) {
-  process.on(signal, () => void stop().then(() => process.exit(1)));
+  process.on(signal, async () => {
+    if (interrupted) return;
+    interrupted = true;
+    await stop();
+    await sweepTests(VAR);
+    process.exit(1);
+  });
 }
 
 /** @param {string[]} args @param {Record<string, string>} [env] */
@@ -32,6 +40,7 @@ const program = (...path) => join(ROOT, "node_modules", ...path);
 /** One check that either holds or does not. @param {string} name @param {string[][]} commands */
 async function check(name, commands) {
   const began = Date.now();
+  if (interrupted) return { passed: 0, failed: 1, skipped: 0 };
   let ok = true;
   for (const command of commands) ok = (await run(command)) === 0 && ok;
   console.log(`${ok ? "passed" : "FAILED"}: ${name} (${Math.round((Date.now() - began) / 1000)} s)`);
@@ -52,6 +61,7 @@ const typecheck = () =>
 
 /** @param {{ browser: boolean, references: boolean }} without */
 async function vitest(without) {
+  if (interrupted) return { passed: 0, failed: 1, skipped: 0 };
   const all = ["unit", "server", "reference", ...(without.browser ? [] : ["browser"])];
   const projects = argumentsForVitest.some((argument) => argument.startsWith("--project")) ? [] : all;
   const args = [
@@ -91,14 +101,18 @@ async function main() {
   const without = await requireTestPackages(own);
   await requireBuild(own);
   const counts = sum(await lint(), await typecheck(), await vitest(without));
+  if (interrupted) return 1;
   if (SUMMARY) writeFileSync(SUMMARY, countsLine(counts));
   console.log(countsLine(counts));
   return counts.failed === 0 ? 0 : 1;
 }
 
 main().then(
-  (code) => process.exit(code),
+  (code) => {
+    if (!interrupted) process.exit(code);
+  },
   async (error) => {
+    if (interrupted) return;
     const known = asRefusal(error, VAR);
     console.error(known instanceof Refusal ? known.message : known);
     await stop();

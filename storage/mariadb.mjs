@@ -1,7 +1,7 @@
 import { spawnSync } from "node:child_process";
 import { existsSync, mkdirSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import { tmpdir, userInfo } from "node:os";
-import { join } from "node:path";
+import { basename, dirname, join } from "node:path";
 import { setTimeout as pause } from "node:timers/promises";
 import { diskFull, mariadbMissing } from "./messages.mjs";
 import { findProgram, isRoot } from "./paths.mjs";
@@ -95,14 +95,15 @@ function installDatabase(program, data, owner) {
     program,
     [
       "--no-defaults",
-      `--datadir=${data}`,
+      // Relative, since the installer splits a path at its spaces.
+      `--datadir=./${basename(data)}`,
       "--skip-test-db",
       "--auth-root-authentication-method=socket",
       `--auth-root-socket-user=${userInfo().username}`,
       "--innodb-log-file-size=24M",
       ...(isRoot ? ["--user=root"] : []),
     ],
-    { encoding: "utf8", env: { ...process.env, [MARK]: owner } },
+    { encoding: "utf8", cwd: dirname(data), env: { ...process.env, [MARK]: owner } },
   );
   if (result.status === 0) return;
   rmSync(data, { recursive: true, force: true });

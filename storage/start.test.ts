@@ -88,6 +88,30 @@ for (const signal of ["SIGTERM", "SIGINT", "SIGHUP"] as const) {
   });
 }
 
+for (const afterMs of [150, 400, 800]) {
+  test(`SIGTERM ${afterMs} ms into the start ends it, and the next start is none the worse`, async () => {
+    const folder = ownFolder();
+    const interrupted = start(folder, { PORT: String(await freePort()) });
+    await pause(afterMs);
+    interrupted.child.kill("SIGTERM");
+    await endOf(interrupted);
+    expect(findMarked(folder)).toEqual([]);
+    const again = await running(folder);
+    again.child.kill();
+    expect((await endOf(again)).code).toBe(0);
+  });
+}
+
+test("a folder with spaces and a path too long for a socket serve as well as any", async () => {
+  const folder = join(ownFolder(), `a folder with spaces ${"x".repeat(90)}`);
+  const started = await running(folder);
+  const connection = await mysql.createConnection(environmentOf(folder).DATABASE_URL ?? "");
+  await connection.end();
+  started.child.kill();
+  expect((await endOf(started)).code).toBe(0);
+  expect(findMarked(folder)).toEqual([]);
+});
+
 test("a second start says where the first one runs and does it no harm", async () => {
   const folder = ownFolder();
   const port = String(await freePort());

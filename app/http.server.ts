@@ -20,6 +20,11 @@ export interface PageProblem {
 const SAFE_METHODS = new Set(["GET", "HEAD", "OPTIONS"]);
 const forms = new WeakMap<Request, FormData>();
 
+/** Keeps what was typed, for a form that is read in another way (upload.server.ts). */
+export function rememberForm(request: Request, form: FormData): void {
+  forms.set(request, form);
+}
+
 /** Reads a form once; what it held can still be shown again if the verb refuses it. */
 export async function readForm(request: Request): Promise<FormData> {
   const known = forms.get(request);

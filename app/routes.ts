@@ -19,7 +19,9 @@ export default [
     route("exhibits/:exhibit", "routes/exhibits/exhibit.tsx"),
     route("exhibits/:exhibit/scenes/:scene", "routes/exhibits/scene.tsx"),
     route("exhibits/:exhibit/scenes/:scene/still.png", "routes/exhibits/still.ts"),
-    // media
+    route("media", "routes/media/media.tsx"),
+    route("media/new", "routes/media/new.tsx"),
+    route("media/:medium", "routes/media/medium.tsx"),
     route("reviews", "routes/reviews/reviews.tsx"),
     route("reviews/:exhibit", "routes/reviews/review.tsx"),
     route("editions", "routes/editions/editions.tsx"),
@@ -48,6 +50,7 @@ export default [
   // -- feeds, pictures, kiosks: anybody --
   route("feed/:exhibit.json", "routes/feed/feed.ts"),
   route("stills/:digest.png", "routes/feed/still.ts"),
+  route("pictures/:file", "routes/feed/picture.ts"),
   route("k/:kiosk", "routes/kiosk/kiosk.tsx"),
   // -- health --
   route("healthz", "routes/health/healthz.ts"),

@@ -4,6 +4,7 @@ import { exhibit } from "#app/database/schema/exhibits.ts";
 import { kiosk } from "#app/database/schema/kiosks.ts";
 import { readNewestEdition } from "#app/editions/read-newest.server.ts";
 import { NotFound } from "#app/errors.ts";
+import { readPictureSources } from "#app/media/read-media.server.ts";
 
 /** What the kiosk page shows; public. `edition` is null while no exhibit is assigned. @throws NotFound */
 export async function readKioskPage(slug: string) {
@@ -18,5 +19,7 @@ export async function readKioskPage(slug: string) {
   if (!found.exhibitSlug) return { kiosk: place, exhibit: null, edition: null };
   const edition = await readNewestEdition(found.exhibitSlug);
   const { number, digest, content, stills } = edition;
-  return { kiosk: place, exhibit: found.exhibitSlug, edition: { number, digest, content, stills } };
+  const shown = content.scenes.flatMap((scene) => (scene.picture ? [scene.picture.digest] : []));
+  const pictures = await readPictureSources([...new Set(shown)]);
+  return { kiosk: place, exhibit: found.exhibitSlug, edition: { number, digest, content, stills, pictures } };
 }

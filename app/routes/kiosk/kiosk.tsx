@@ -6,6 +6,7 @@ import { readKioskPage } from "#app/kiosks/read-kiosk-page.server.ts";
 import { claimsSentence } from "#app/scene/claims.ts";
 import { PlaceTable } from "#app/stage/PlaceTable.tsx";
 import { VolumeStage } from "#app/stage/VolumeStage.tsx";
+import { Picture } from "#app/ui/Picture.tsx";
 import type { PageHandle } from "#app/ui/page-handle.ts";
 import type { Route } from "./+types/kiosk";
 import { HowWeKnow } from "./HowWeKnow.tsx";
@@ -166,6 +167,17 @@ function Shown({ edition, language, resets, startAgain, onTurn }: ShownProps) {
           <StarCard member={selected} language={language} onHow={() => setAsks(true)} />
           <div>
             <SceneWords scene={scene} language={language} />
+            {scene.picture ? (
+              <Picture
+                sources={edition.pictures[scene.picture.digest] ?? []}
+                alt={scene.picture.alt[language] ?? scene.picture.alt.en}
+                width={scene.picture.width}
+                height={scene.picture.height}
+                sizes="40vw"
+                credit={`${scene.picture.creditLine} (${scene.picture.licence})`}
+                className="mt-4 max-w-xl"
+              />
+            ) : null}
             <details className="mt-4">
               <summary className="target-mm-14 flex items-center font-head underline">{words.table}</summary>
               <PlaceTable document={scene.document} members={members} language={language} />

@@ -1,0 +1,40 @@
+import { LICENCES, type Licence } from "#app/database/enums.ts";
+import { Field } from "#app/ui/Field.tsx";
+import { Select } from "#app/ui/Select.tsx";
+import { TextArea } from "#app/ui/TextArea.tsx";
+import type { formState } from "../form-state.ts";
+
+export const LICENCE_WORDS: Record<Licence, string> = {
+  "CC0-1.0": "CC0 1.0, no rights reserved",
+  "CC-BY-4.0": "CC BY 4.0",
+  "CC-BY-SA-4.0": "CC BY-SA 4.0",
+  "public-domain": "public domain",
+  "own-work": "our own work",
+  "by-written-permission": "by written permission",
+};
+
+/** What a picture cannot be shown without. */
+export function MediaFields({ form }: { form: ReturnType<typeof formState> }) {
+  const field = (name: string) => ({ name, defaultValue: form.value(name), error: form.error(name) });
+  return (
+    <>
+      <Field label="Creator" hint="Who took it or made it." required {...field("creator")} />
+      <Field label="Credit line" hint="Shown with it wherever it is shown." required {...field("creditLine")} />
+      <Select
+        label="Licence"
+        placeholder="Choose a licence"
+        options={LICENCES.map((one) => ({ value: one, label: LICENCE_WORDS[one] }))}
+        required
+        {...field("licence")}
+      />
+      <TextArea
+        label="Alternative text"
+        hint="What the picture shows, for those who do not see it."
+        rows={2}
+        required
+        {...field("altEn")}
+      />
+      <TextArea label="Alternative text in French" lang="fr" rows={2} {...field("altFr")} />
+    </>
+  );
+}

@@ -13,7 +13,8 @@ export default [
     route("sources", "routes/sources/sources.tsx"),
     route("sources/new", "routes/sources/new.tsx"),
     route("sources/:source", "routes/sources/source.tsx"),
-    // intake
+    route("intake", "routes/intake/intakes.tsx"),
+    route("intake/:intake", "routes/intake/intake.tsx"),
     route("exhibits", "routes/exhibits/exhibits.tsx"),
     route("exhibits/new", "routes/exhibits/new.tsx"),
     route("exhibits/:exhibit", "routes/exhibits/exhibit.tsx"),

@@ -1,0 +1,60 @@
+import { parse } from "csv-parse/sync";
+import { Invalid } from "#app/errors.ts";
+import { MOST_CELL, MOST_COLUMNS, MOST_ROWS, type Table, type TableColumn } from "./table.ts";
+
+const DELIMITERS = [",", ";", "\t"];
+/** What stands in a line of units under the head, as archives print it. */
+const UNIT = /^(|-+|deg|mas|mas\/yr|mas\.yr-1|arcsec|mag|km\/s|km\.s-1|yr|d|pc|"h:m:s"|"d:m:s"|h:m:s|d:m:s)$/i;
+
+function refuse(message: string): never {
+  throw new Invalid({ file: [message] });
+}
+
+/** The delimiter that parts the head into the most columns. */
+function delimiterOf(head: string): string {
+  const count = (delimiter: string) => head.split(delimiter).length;
+  return DELIMITERS.reduce((best, one) => (count(one) > count(best) ? one : best));
+}
+
+/**
+ * Reads comma-, semicolon- or tab-separated text: comment lines (#), a byte-order mark, and a line of units under the head
+ * as the archives write them. Rows of another width than the head are kept as they are; the dry run reports them.
+ * @throws Invalid at `file`
+ */
+export function readCsv(text: string): Table {
+  const head = text.split(/\r?\n/).find((line) => line.trim() !== "" && !line.startsWith("#")) ?? "";
+  if (head.length > 100_000) refuse("The first line is longer than any head of a table. This does not look like CSV.");
+  const delimiter = delimiterOf(head);
+  let lines: string[][];
+  try {
+    lines = parse(text, {
+      delimiter,
+      bom: true,
+      comment: "#",
+      comment_no_infix: true,
+      relax_column_count: true,
+      skip_empty_lines: true,
+      trim: true,
+      max_record_size: MOST_COLUMNS * MOST_CELL,
+      to: MOST_ROWS + 3,
+    });
+  } catch (error) {
+    return refuse(`This cannot be read as CSV: ${error instanceof Error ? error.message : error}.`);
+  }
+  const [names, ...rest] = lines;
+  if (!names || names.length < 2) refuse("A table has at least two columns, parted by commas, semicolons or tabs.");
+  if (names.length > MOST_COLUMNS)
+    refuse(`More than ${MOST_COLUMNS} columns. This does not look like a table of records.`);
+  if (names.some((name) => name === "" || name.length > 200)) refuse("The first line does not name every column.");
+  if (new Set(names).size !== names.length) refuse("Two columns have the same name.");
+  const hasUnits = rest[0]?.every((cell) => UNIT.test(cell)) && rest[0].some((cell) => /[a-z]/i.test(cell));
+  const units = hasUnits ? rest[0] : undefined;
+  const rulers = (line: string[]) => line.every((cell) => /^-+$/.test(cell));
+  const data = rest.slice(hasUnits ? 1 : 0).filter((line) => !rulers(line));
+  if (data.length === 0) refuse("There is a head, but no row under it.");
+  if (data.length > MOST_ROWS) refuse(`More than ${MOST_ROWS} rows. Part the file first.`);
+  const columns = names.map(
+    (name, at): TableColumn => ({ name, unit: units?.[at]?.replace(/"/g, "") || null, ucd: null }),
+  );
+  return { format: "csv", columns, rows: data.map((cells, at) => ({ number: at + 1, cells })) };
+}

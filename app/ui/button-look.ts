@@ -6,7 +6,7 @@ const LOOKS: Record<ButtonLook, string> = {
   primary: "border-ink bg-ink px-4 text-paper hover:bg-paper hover:text-ink",
   quiet: "border-ink px-4 text-ink hover:bg-ink hover:text-paper",
   danger: "border-vermilion px-4 text-vermilion hover:bg-vermilion hover:text-paper",
-  plain: "border-transparent px-1 text-ink underline decoration-edge underline-offset-4 hover:decoration-ink",
+  plain: "min-w-6 border-transparent px-1 text-ink underline decoration-edge underline-offset-4 hover:decoration-ink",
 };
 
 export function buttonClass(look: ButtonLook = "quiet", more?: string): string {

@@ -92,8 +92,8 @@ export function CastList({ scene, resolved, records, mayWrite, selectedId, onSel
 
 function Standing({ member }: { member: Member }) {
   return (
-    <p className="flex flex-wrap gap-x-3 text-sm text-ink-soft">
-      <Link to={`/stars/${member.recordId}`} className="link">
+    <p className="flex flex-wrap items-center gap-x-3 text-sm text-ink-soft">
+      <Link to={`/stars/${member.recordId}`} className="link tap inline-flex items-center">
         record
       </Link>
       {member.regime ? REGIME_WORDS[member.regime] : null}

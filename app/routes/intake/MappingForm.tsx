@@ -133,7 +133,7 @@ function columnsOf(form: FormState): Column<Placed>[] {
       id: "unit",
       head: "In",
       cell: (row) =>
-        row.use.meaning === "identifier" ? (
+        form.value(`meaning-${row.at}`) === "identifier" ? (
           <Select
             label={`Whose identifier ${row.name} is`}
             placeholder="Choose a catalogue"

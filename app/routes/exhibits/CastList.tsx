@@ -113,6 +113,7 @@ function MemberForms({ member, scene }: { member: Member; scene: Page["scene"] }
         intent="label-cast"
         look="plain"
         pending="…"
+        className="px-1.5 text-sm font-normal"
         aria-label={`${member.labelled ? "Hide" : "Show"} the name of ${member.name.en} in the picture`}
       >
         {member.labelled ? "hide name" : "show name"}
@@ -121,6 +122,7 @@ function MemberForms({ member, scene }: { member: Member; scene: Page["scene"] }
         intent="remove-from-cast"
         look="plain"
         pending="…"
+        className="px-1.5 text-sm font-normal"
         aria-label={`Take ${member.name.en} out of the cast`}
       >
         take out

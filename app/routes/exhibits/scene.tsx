@@ -73,11 +73,14 @@ export default function Scene({ loaderData, actionData }: Route.ComponentProps) 
           {mayWrite ? <RemoveScene {...loaderData} /> : null}
         </div>
       </header>
-      <div className="grid lg:grid-cols-[17rem_1fr] xl:grid-cols-[17rem_1fr_23rem]">
+      <div className="grid lg:grid-cols-[20rem_1fr] xl:grid-cols-[20rem_1fr_23rem]">
         <section aria-label="Cast" className="border-rule px-6 py-5 max-lg:order-2 lg:border-r">
           <CastList {...loaderData} actionData={actionData} selectedId={selectedId} onSelect={select} />
         </section>
-        <section aria-label="Stage" className="night flex min-h-[26rem] flex-col max-lg:order-1">
+        <section
+          aria-label="Stage"
+          className="night flex min-h-[26rem] flex-col max-lg:order-1 max-lg:h-[70dvh] lg:sticky lg:top-0 lg:h-dvh lg:max-h-[60rem]"
+        >
           <VolumeStage
             document={document}
             members={members}

@@ -2,6 +2,7 @@ import { Form, Link, redirect } from "react-router";
 import { Invalid } from "#app/errors.ts";
 import { answered, answeredAction, readForm } from "#app/http.server.ts";
 import { parseInput } from "#app/parse-input.ts";
+import { mayDo } from "#app/people/permissions.ts";
 import { requireActor } from "#app/people/require-actor.server.ts";
 import { approveExhibit } from "#app/review/approve-exhibit.server.ts";
 import { readReview } from "#app/review/read-review.server.ts";
@@ -26,10 +27,14 @@ export const meta: Route.MetaFunction = ({ loaderData }) => [
   { title: `Review ${loaderData?.exhibit.titleEn ?? ""} · Alidade` },
 ];
 
-export const loader = answered(async ({ context, params, request }: Route.LoaderArgs) => ({
-  ...(await readReview(requireActor(context), params.exhibit)),
-  said: new URL(request.url).searchParams.get("said"),
-}));
+export const loader = answered(async ({ context, params, request }: Route.LoaderArgs) => {
+  const actor = requireActor(context);
+  return {
+    ...(await readReview(actor, params.exhibit)),
+    mayPublish: mayDo(actor.roles, "edition.publish"),
+    said: new URL(request.url).searchParams.get("said"),
+  };
+});
 
 export const action = answeredAction(async ({ request, context, params }: Route.ActionArgs) => {
   const actor = requireActor(context);
@@ -71,7 +76,7 @@ export default function Review({ loaderData, actionData }: Route.ComponentProps)
           </StateMark>
         }
         actions={
-          exhibit.state === "approved" ? (
+          exhibit.state === "approved" && loaderData.mayPublish ? (
             <LinkButton look="primary" to={`/editions/${exhibit.id}`}>
               Publish it
             </LinkButton>

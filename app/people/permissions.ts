@@ -11,7 +11,6 @@ export const PERMISSIONS = {
   "account.use": EVERYBODY,
   "people.manage": ["admin"],
   "mail.read": ["admin"],
-  "health.read": ["admin"],
   "audit.read": EVERYBODY,
   "catalogue.read": EVERYBODY,
   "source.write": CURATORS,

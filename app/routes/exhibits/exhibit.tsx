@@ -8,6 +8,7 @@ import { removeScene } from "#app/exhibits/remove-scene.server.ts";
 import { renameExhibit } from "#app/exhibits/rename-exhibit.server.ts";
 import { answered, answeredAction, readForm } from "#app/http.server.ts";
 import { parseInput } from "#app/parse-input.ts";
+import { authorise } from "#app/people/authorise.ts";
 import { mayDo } from "#app/people/permissions.ts";
 import { requireActor } from "#app/people/require-actor.server.ts";
 import { readReview } from "#app/review/read-review.server.ts";
@@ -64,6 +65,7 @@ export const action = answeredAction(async ({ request, context, params }: Route.
       await orderScenes(actor, parseInput(OrderScenes, form));
       return back("ordered");
     case "move-scene": {
+      authorise(actor, "exhibit.write");
       const { content } = await readReview(actor, params.exhibit);
       const ids = content.scenes.map((one) => one.id);
       const order = movedInOrder(ids, String(form.get("sceneId")), form.get("by") === "-1" ? -1 : 1);

@@ -16,6 +16,7 @@ import { sceneFromForm } from "#app/exhibits/scene-form.ts";
 import { setSceneMedia } from "#app/exhibits/set-scene-media.server.ts";
 import { unbindFigure } from "#app/exhibits/unbind-figure.server.ts";
 import { parseInput } from "#app/parse-input.ts";
+import { authorise } from "#app/people/authorise.ts";
 
 interface Place {
   exhibit: string;
@@ -37,6 +38,7 @@ const DEEDS: Record<string, { tab: string; act: (actor: Actor, form: FormData, p
 };
 
 async function moveCast(actor: Actor, form: FormData, place: Place): Promise<void> {
+  authorise(actor, "exhibit.write");
   const { resolved } = await readScene(actor, place.exhibit, place.scene);
   const ids = resolved.cast.map((one) => one.recordId);
   const order = movedInOrder(ids, String(form.get("recordId")), form.get("by") === "-1" ? -1 : 1);

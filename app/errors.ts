@@ -26,12 +26,19 @@ export class Conflict extends AppError {
   readonly kind = "conflict";
 }
 
+/** A page of ours that helps to mend what is refused: the record that has an identifier already. */
+export interface ErrorLink {
+  to: string;
+  label: string;
+}
+
 /** Input that a person can mend: messages by field name; "" is the form as a whole. */
 export class Invalid extends AppError {
   readonly kind = "invalid";
   constructor(
     readonly fields: FieldErrors,
     message = Object.values(fields).flat()[0] ?? "Some of the input needs attention.",
+    readonly links: readonly ErrorLink[] = [],
   ) {
     super(message);
   }

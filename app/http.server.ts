@@ -2,11 +2,17 @@ import { randomBytes } from "node:crypto";
 import { data, type MiddlewareFunction } from "react-router";
 import { nonceContext, requestIdContext } from "./context.server.ts";
 import { env } from "./env.server.ts";
-import { AppError, answerFor, type ErrorKind, type FieldErrors, Invalid, TooMany } from "./errors.ts";
+import { AppError, answerFor, type ErrorKind, type ErrorLink, type FieldErrors, Invalid, TooMany } from "./errors.ts";
 
 /** What a refused form gets back: messages by field, and what was typed, so that nothing is lost. */
 export interface FormProblem {
-  problem: { kind: ErrorKind; message: string; errors: FieldErrors; values: Record<string, string> };
+  problem: {
+    kind: ErrorKind;
+    message: string;
+    errors: FieldErrors;
+    values: Record<string, string>;
+    links?: readonly ErrorLink[];
+  };
 }
 
 /** What an error page is given instead of the error itself. */
@@ -79,8 +85,9 @@ export function answeredAction<A extends { request: Request }, R>(act: (args: A)
       const { status } = answerFor(error);
       if (!BACK_TO_THE_FORM.has(error.kind)) throw data(pageProblem(error), { status });
       const errors = error instanceof Invalid ? error.fields : { "": [error.message] };
+      const links = error instanceof Invalid && error.links.length > 0 ? { links: error.links } : {};
       const problem: FormProblem = {
-        problem: { kind: error.kind, message: error.message, errors, values: typedValues(args.request) },
+        problem: { kind: error.kind, message: error.message, errors, values: typedValues(args.request), ...links },
       };
       return data(problem, { status, headers: retryHeaders(error) });
     }

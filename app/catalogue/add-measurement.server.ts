@@ -1,4 +1,4 @@
-import { eq } from "drizzle-orm";
+import { and, eq, ne } from "drizzle-orm";
 import type { Actor } from "#app/audit/actor.ts";
 import { type Change, change } from "#app/audit/change.server.ts";
 import { newId } from "#app/database/new-id.ts";
@@ -20,7 +20,7 @@ export function measurementColumns(input: NewMeasurement, enteredBy: string) {
   };
 }
 
-/** Proposes a measurement. Nothing is adopted by it. @throws Invalid, NotFound */
+/** Proposes a measurement. Nothing is adopted by it. The same form sent twice proposes it once. @throws Invalid, NotFound */
 export async function addMeasurement(actor: Actor | null, input: NewMeasurement): Promise<string> {
   authorise(actor, "record.write");
   return change(actor, "catalogue.add-measurement", (c) => insertMeasurement(c, input));
@@ -28,6 +28,11 @@ export async function addMeasurement(actor: Actor | null, input: NewMeasurement)
 
 async function insertMeasurement(c: Change, input: NewMeasurement): Promise<string> {
   const opened = await openRecord(c, input.recordId);
+  const same = await readSame(c, input);
+  if (same) {
+    c.unchanged();
+    return same;
+  }
   if (input.sourceId) {
     const [known] = await c.tx.select({ id: source.id }).from(source).where(eq(source.id, input.sourceId));
     if (!known) throw new Invalid({ sourceId: ["There is no such source."] });
@@ -44,4 +49,17 @@ async function insertMeasurement(c: Change, input: NewMeasurement): Promise<stri
   // Colour and brightness are read without being adopted, so a new one may move a picture.
   c.touch({ type: "record", id: opened.id });
   return id;
+}
+
+/** What says exactly the same of the record already and is not set aside. */
+async function readSame(c: Change, input: NewMeasurement): Promise<string | undefined> {
+  const { recordId, quantity } = input;
+  const standing = await c.tx
+    .select()
+    .from(measurement)
+    .where(
+      and(eq(measurement.recordId, recordId), eq(measurement.quantity, quantity), ne(measurement.state, "rejected")),
+    );
+  const names = Object.keys(input) as (keyof NewMeasurement)[];
+  return standing.find((row) => names.every((name) => row[name] === input[name]))?.id;
 }

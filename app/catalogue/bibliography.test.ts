@@ -11,6 +11,8 @@ test.each([
   "2015PASP..127..994B",
   "1973PASP...85..573L",
   "2019Natur.567..200P",
+  "2021A&A...649A...2L",
+  "1997ESASP1200.....E",
 ])("%s is a bibcode", (code) => {
   expect(isBibcode(code)).toBe(true);
 });
@@ -22,6 +24,11 @@ test.each([
   "07A&A...474..653Vxx",
   "2007 A&A..474..653V",
   "1007A&A...474..653V",
+  "2007.A&A..474..653V",
+  "2007A.A...474..653V",
+  "2007.....474..653Vx",
+  "2007A&A...474..653v",
+  "2007A&A..._74..653V",
 ])("%j is none", (code) => {
   expect(isBibcode(code)).toBe(false);
 });

@@ -5,7 +5,7 @@ import { measurement, record } from "#app/database/schema/catalogue.ts";
 import { Conflict, Forbidden, Invalid, Locked } from "#app/errors.ts";
 import { parseInput } from "#app/parse-input.ts";
 import "#app/review/register.server.ts";
-import { makeMeasurement, makeRecord, makeSource, makeVettedStar } from "#tests/factories/catalogue.ts";
+import { makeMeasurement, makeRecord, makeVettedStar } from "#tests/factories/catalogue.ts";
 import { makeActor } from "#tests/factories/person.ts";
 import { adoptParallax } from "./adopt-parallax.server.ts";
 import { createRecord } from "./create-record.server.ts";
@@ -111,9 +111,10 @@ test("a save without a change changes nothing, a change makes a vetted record a 
 
 test("an identifier belongs to one record, and the refusal names it", async () => {
   const { editor } = await people();
-  await makeRecord(editor, { name: "Owner", identifiers: "HIP 99991; hd 777" });
+  const owner = await makeRecord(editor, { name: "Owner", identifiers: "HIP 99991; hd 777" });
   await expect(makeRecord(editor, { identifiers: "hip099991" })).rejects.toMatchObject({
     fields: { identifiers: [expect.stringContaining("HIP 99991 is Owner's already")] },
+    links: [{ to: `/stars/${owner}`, label: "Open Owner" }],
   });
 });
 
@@ -199,10 +200,21 @@ test("un-vetting asks for a scientist and leaves a draft", async () => {
   expect((await recordRow(recordId))?.state).toBe("draft");
 });
 
-test("the same publication twice is refused at the field", async () => {
-  const { editor } = await people();
-  await makeSource(editor, { bibcode: "2007A&A...474..653V" });
-  await expect(makeSource(editor, { bibcode: "2007A&A...474..653V" })).rejects.toMatchObject({
-    fields: { bibcode: [expect.any(String)] },
-  });
+test("names of unknown languages, empty or too long ones are refused, and nothing is cut off", () => {
+  const refused = (otherNames: string) => {
+    try {
+      parseInput(CreateRecord, { name: "x", kind: "star", otherNames });
+    } catch (error) {
+      return (error as Invalid).fields.otherNames;
+    }
+    return [];
+  };
+  expect(refused("de: Wega")).toEqual([expect.stringContaining("en, fr")]);
+  expect(refused("fr:")).toHaveLength(1);
+  expect(refused(`fr: ${"x".repeat(121)}\nde: y`)).toHaveLength(2);
+  const { otherNames } = parseInput(CreateRecord, { name: "x", kind: "star", otherNames: "fr: Véga\r\nα Lyrae" });
+  expect(otherNames).toEqual([
+    { language: "fr", name: "Véga" },
+    { language: null, name: "α Lyrae" },
+  ]);
 });

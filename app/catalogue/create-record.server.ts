@@ -1,8 +1,12 @@
+import { eq } from "drizzle-orm";
 import type { z } from "zod";
 import type { Actor } from "#app/audit/actor.ts";
 import { type Change, change } from "#app/audit/change.server.ts";
+import { duplicateKey } from "#app/database/database-error.ts";
+import { db } from "#app/database/db.server.ts";
 import { newId } from "#app/database/new-id.ts";
 import { record } from "#app/database/schema/catalogue.ts";
+import { Conflict } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
 import type { CreateRecord } from "./record-input.ts";
 import { writeNames } from "./record-names.server.ts";
@@ -26,16 +30,33 @@ export function recordColumns(input: NewRecord) {
   };
 }
 
-/** Writes a record inside a change; also how intake writes them. @throws Invalid at `identifiers` */
-export async function insertRecord(c: Change, input: NewRecord): Promise<string> {
-  const recordId = newId();
+/** Writes a record inside a change. @throws Invalid at `identifiers` */
+async function insertRecord(c: Change, recordId: string, input: NewRecord): Promise<string> {
+  const { submission: _, ...after } = input;
   await c.tx.insert(record).values({ id: recordId, ...recordColumns(input), createdBy: c.actor.personId });
   await writeNames(c, recordId, input);
-  c.audit({ objectType: "record", objectId: recordId, objectName: input.name, after: input });
+  c.audit({ objectType: "record", objectId: recordId, objectName: input.name, after });
   return recordId;
 }
 
+/** Opens a record. The same form sent twice opens it once. @throws Invalid at `identifiers`, Conflict */
 export async function createRecord(actor: Actor | null, input: NewRecord): Promise<string> {
   authorise(actor, "record.write");
-  return change(actor, "catalogue.create-record", (c) => insertRecord(c, input));
+  const recordId = input.submission ?? newId();
+  try {
+    return await change(actor, "catalogue.create-record", (c) => insertRecord(c, recordId, input));
+  } catch (error) {
+    if (duplicateKey(error) !== "PRIMARY") throw error;
+    await refuseOtherInput(actor, recordId, input);
+    return recordId;
+  }
+}
+
+/** @throws Conflict unless what was kept from this form before is what it holds now */
+async function refuseOtherInput(actor: Actor, recordId: string, input: NewRecord): Promise<void> {
+  const [kept] = await db().select().from(record).where(eq(record.id, recordId));
+  const columns = recordColumns(input);
+  const names = Object.keys(columns) as (keyof typeof columns)[];
+  if (kept?.createdBy === actor.personId && names.every((name) => kept[name] === columns[name])) return;
+  throw new Conflict("A record was kept from this form already. Send it once more if you mean another one.");
 }

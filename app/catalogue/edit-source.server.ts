@@ -7,7 +7,7 @@ import { source } from "#app/database/schema/catalogue.ts";
 import { NotFound } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
 import { shortCitation } from "./citation.ts";
-import { refuseDuplicateSource } from "./create-source.server.ts";
+import { keptAlready, readDuplicate } from "./duplicate-source.server.ts";
 import type { EditSource } from "./source-input.ts";
 
 /** A source is read in seals and editions: those under review are looked at again. @throws Conflict, Invalid, NotFound */
@@ -23,5 +23,7 @@ export async function editSource(actor: Actor | null, input: z.output<typeof Edi
     await compareAndSet(c.tx, source, sourceId, version, after);
     c.audit({ objectType: "source", objectId: sourceId, objectName: shortCitation(after), before, after });
     c.touch({ type: "source", id: sourceId });
-  }).catch(refuseDuplicateSource);
+  }).catch(async (error: unknown) => {
+    throw keptAlready(await readDuplicate(error, after));
+  });
 }

@@ -6,6 +6,7 @@ import { compareAndSet } from "#app/database/compare-and-set.server.ts";
 import { measurement } from "#app/database/schema/catalogue.ts";
 import { Forbidden, Locked, NotFound } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
+import { mayDo } from "#app/people/permissions.ts";
 import type { ConfirmMeasurement, RejectMeasurement } from "./measurement-input.ts";
 import { openRecord } from "./open-record.server.ts";
 import { QUANTITY_FACTS } from "./quantities.ts";
@@ -30,11 +31,22 @@ function note(c: Change, { measurement: of, record }: Opened, after: object, sai
   c.touch({ type: "record", id: record.id });
 }
 
-/** Sets a measurement aside, with the reason; it stays readable. @throws Locked while it is the adopted one */
+/** A scientist judges any measurement; whoever entered one may take it back until it is vetted. */
+export function mayReject(actor: Pick<Actor, "personId" | "roles">, of: { enteredBy: string; state: string }): boolean {
+  return mayDo(actor.roles, "record.vet") || (of.enteredBy === actor.personId && of.state !== "vetted");
+}
+
+/**
+ * Sets a measurement aside, with the reason; it stays readable.
+ * @throws Forbidden for what others entered, unless a scientist asks; Locked while it is the adopted one
+ */
 export async function rejectMeasurement(actor: Actor | null, input: z.output<typeof RejectMeasurement>): Promise<void> {
-  authorise(actor, "record.vet");
+  authorise(actor, "record.write");
   await change(actor, "catalogue.reject-measurement", async (c) => {
     const opened = await openMeasurement(c, input.measurementId);
+    if (!mayReject(actor, opened.measurement)) {
+      throw new Forbidden("Only a scientist sets aside what others entered, or what is vetted.");
+    }
     if (opened.record.adoptedParallaxId === opened.measurement.id) {
       throw new Locked("This measurement is adopted. Adopt another one first.");
     }

@@ -4,9 +4,9 @@ import { compareAndSet } from "#app/database/compare-and-set.server.ts";
 import { record } from "#app/database/schema/catalogue.ts";
 import { NotFound } from "#app/errors.ts";
 
-/** @throws NotFound */
+/** Reads a record and holds it until the change is done: of two who press at once, one comes after the other. @throws NotFound */
 export async function openRecord(c: Pick<Change, "tx">, recordId: string) {
-  const [found] = await c.tx.select().from(record).where(eq(record.id, recordId));
+  const [found] = await c.tx.select().from(record).where(eq(record.id, recordId)).for("update");
   if (!found) throw new NotFound("There is no such record.");
   return found;
 }

@@ -69,6 +69,7 @@ export function knownUnit(quantity: Quantity, text: string): string | null {
 export function toCanonical(quantity: Quantity, value: string, unit: string): number {
   const factor = QUANTITY_FACTS[quantity].units[unit];
   if (factor === undefined) throw new RangeError(`"${unit}" is no unit of ${quantity}`);
-  // 1e-3 is no double: dividing by 1000 loses less.
-  return factor >= 1 ? Number(value) * factor : Number(value) / (1 / factor);
+  // Every factor is a power of ten: it moves the decimal point in the text, so that nothing is rounded twice.
+  const [digits, exponent = "0"] = value.split(/e/i);
+  return Number(`${digits}e${Number(exponent) + Math.round(Math.log10(factor))}`);
 }

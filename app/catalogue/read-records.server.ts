@@ -4,6 +4,7 @@ import { db } from "#app/database/db.server.ts";
 import type { RecordState } from "#app/database/enums.ts";
 import { record, recordIdentifier, recordName } from "#app/database/schema/catalogue.ts";
 import { authorise } from "#app/people/authorise.ts";
+import { parseIdentifier } from "./record-input.ts";
 
 export interface RecordQuery {
   /** Part of any name, or an identifier such as "HIP 91262". */
@@ -68,7 +69,10 @@ function searchFor(search: string): SQL | undefined {
   const text = search.trim();
   if (!text) return undefined;
   const part = `%${text.replace(/[\\%_]/g, "\\$&")}%`;
-  const bare = text.replace(/^(hip|hd|hr|gj|gliese|gaia dr3|m|ngc)\s*/i, "").replace(/\s+/g, "");
+  const identifier = parseIdentifier(text);
+  const sameIdentifier = identifier
+    ? and(eq(recordIdentifier.catalogue, identifier.catalogue), eq(recordIdentifier.value, identifier.value))
+    : eq(recordIdentifier.value, text.replace(/\s+/g, "").toUpperCase());
   return or(
     like(record.name, part),
     exists(
@@ -81,7 +85,7 @@ function searchFor(search: string): SQL | undefined {
       db()
         .select({ id: recordIdentifier.id })
         .from(recordIdentifier)
-        .where(and(eq(recordIdentifier.recordId, record.id), eq(recordIdentifier.value, bare))),
+        .where(and(eq(recordIdentifier.recordId, record.id), sameIdentifier)),
     ),
   );
 }

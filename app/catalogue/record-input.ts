@@ -42,16 +42,33 @@ export interface OtherName {
   name: string;
 }
 
-const NAME_LINE = new RegExp(`^(?:(${LANGUAGES.join("|")}):)?\\s*(.+)$`);
+const NAME_LINE = /^(?:([a-z]{2})\s*:)?\s*(.*)$/;
+const isLanguage = (text: string): text is (typeof LANGUAGES)[number] => LANGUAGES.some((one) => one === text);
+
+/** @throws RangeError that says what is wrong with the line */
+function parseNameLine(line: string): OtherName {
+  const [, language, name = line] = NAME_LINE.exec(line) ?? [];
+  if (language && !isLanguage(language)) {
+    throw new RangeError(`“${line}”: names are kept in the languages ${LANGUAGES.join(", ")}.`);
+  }
+  if (name === "") throw new RangeError(`“${line}” has no name behind the language.`);
+  if (name.length > 120) throw new RangeError(`“${name.slice(0, 30)}…” is longer than 120 characters.`);
+  return { language: language && isLanguage(language) ? language : null, name };
+}
 
 const otherNames = z
   .string()
   .max(2000, "At most 2000 characters.")
   .default("")
-  .transform((text): OtherName[] =>
-    lines(text).map((line) => {
-      const [, language, name = line] = NAME_LINE.exec(line) ?? [];
-      return { language: (language as OtherName["language"]) ?? null, name: name.trim().slice(0, 120) };
+  .transform((text, context): OtherName[] =>
+    lines(text).flatMap((line) => {
+      try {
+        return [parseNameLine(line)];
+      } catch (problem) {
+        if (!(problem instanceof RangeError)) throw problem;
+        context.addIssue({ code: "custom", message: problem.message });
+        return [];
+      }
     }),
   );
 
@@ -69,6 +86,7 @@ const CATALOGUES: [name: string, pattern: RegExp][] = [
   ["GJ", /^(?:gj|gl|gliese)\s*(\d{1,4}(?:\.\d+)?\s?[A-D]?)$/i],
   ["M", /^(?:m|messier)\s*(\d{1,3})$/i],
   ["NGC", /^ngc\s*(\d{1,4})$/i],
+  ["IC", /^ic\s*(\d{1,4})$/i],
 ];
 
 /** @returns null when the catalogue is not one that is known */
@@ -124,7 +142,13 @@ const fields = {
 const wholePosition = (input: { ra: unknown; dec: unknown }) => (input.ra === null) === (input.dec === null);
 const HALF = { path: ["dec"], error: "A position is both: right ascension and declination." };
 
-export const CreateRecord = z.object(fields).refine(wholePosition, HALF);
+/** Made with the form: the record's id, so that a form sent twice keeps one record. */
+const submission = z
+  .string()
+  .regex(/^[0-9A-HJKMNP-TV-Z]{26}$/, "Open the form again.")
+  .optional();
+
+export const CreateRecord = z.object({ ...fields, submission }).refine(wholePosition, HALF);
 export const version = z.coerce.number().int().positive();
 export const EditRecord = z.object({ recordId: z.string(), version, ...fields }).refine(wholePosition, HALF);
 

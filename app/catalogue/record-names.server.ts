@@ -1,5 +1,6 @@
 import { and, eq, inArray, ne, or } from "drizzle-orm";
 import type { Change } from "#app/audit/change.server.ts";
+import { CHANGED_SINCE_READ, duplicateKey } from "#app/database/database-error.ts";
 import { record, recordIdentifier, recordName } from "#app/database/schema/catalogue.ts";
 import { Invalid } from "#app/errors.ts";
 import type { Identifier, OtherName } from "./record-input.ts";
@@ -8,7 +9,12 @@ import type { Identifier, OtherName } from "./record-input.ts";
 async function refuseTaken(c: Change, recordId: string, identifiers: Identifier[]): Promise<void> {
   if (identifiers.length === 0) return;
   const taken = await c.tx
-    .select({ catalogue: recordIdentifier.catalogue, value: recordIdentifier.value, name: record.name })
+    .select({
+      catalogue: recordIdentifier.catalogue,
+      value: recordIdentifier.value,
+      recordId: record.id,
+      name: record.name,
+    })
     .from(recordIdentifier)
     .innerJoin(record, eq(record.id, recordIdentifier.recordId))
     .where(
@@ -22,8 +28,16 @@ async function refuseTaken(c: Change, recordId: string, identifiers: Identifier[
       ),
     );
   if (taken.length === 0) return;
-  const message = taken.map((one) => `${one.catalogue} ${one.value} is ${one.name}'s already.`).join(" ");
-  throw new Invalid({ identifiers: [message] });
+  const messages = taken.map((one) => `${one.catalogue} ${one.value} is ${one.name}'s already.`);
+  const owners = new Map(taken.map((one) => [one.recordId, one.name]));
+  const links = [...owners].map(([id, name]) => ({ to: `/stars/${id}`, label: `Open ${name}` }));
+  throw new Invalid({ identifiers: messages }, undefined, links);
+}
+
+/** Somebody else has just taken one of the identifiers: the change is run again, and then finds who. */
+function runAgain(error: unknown): never {
+  if (duplicateKey(error) !== "record_identifier_unique") throw error;
+  throw Object.assign(new Error("An identifier was taken meanwhile", { cause: error }), { errno: CHANGED_SINCE_READ });
 }
 
 /** Replaces the other names and the identifiers of a record. */
@@ -45,7 +59,8 @@ export async function writeNames(
   });
   if (nameRows.length > 0) await c.tx.insert(recordName).values(nameRows);
   if (unique.size > 0) {
-    await c.tx.insert(recordIdentifier).values([...unique.values()].map((one) => ({ recordId, ...one })));
+    const rows = [...unique.values()].map((one) => ({ recordId, ...one }));
+    await c.tx.insert(recordIdentifier).values(rows).catch(runAgain);
   }
 }
 

@@ -3,6 +3,7 @@ import type { z } from "zod";
 import type { Actor } from "#app/audit/actor.ts";
 import { type Change, change } from "#app/audit/change.server.ts";
 import type { Reader } from "#app/database/db.server.ts";
+import { auditEntry } from "#app/database/schema/audit.ts";
 import { measurement, type record } from "#app/database/schema/catalogue.ts";
 import { type FieldErrors, Forbidden, Invalid } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
@@ -19,8 +20,24 @@ export async function readGate(reader: Reader, of: RecordRow): Promise<{ facts: 
     .from(measurement)
     .where(and(eq(measurement.recordId, of.id), ne(measurement.state, "rejected")));
   const adopted = ledger.find((one) => one.id === of.adoptedParallaxId) ?? null;
-  const hands = [of.createdBy, of.adoptedBy, ...ledger.map((one) => one.enteredBy)];
+  const editors = await readEditors(reader, of.id);
+  const hands = [of.createdBy, of.adoptedBy, ...editors, ...ledger.map((one) => one.enteredBy)];
   return { facts: { ...of, adopted }, hands: [...new Set(hands.filter((id) => id !== null))] };
+}
+
+/** Everybody who ever changed the record's names or position: the audit log does not forget. */
+async function readEditors(reader: Reader, recordId: string): Promise<(string | null)[]> {
+  const rows = await reader
+    .selectDistinct({ personId: auditEntry.personId })
+    .from(auditEntry)
+    .where(
+      and(
+        eq(auditEntry.objectType, "record"),
+        eq(auditEntry.objectId, recordId),
+        eq(auditEntry.verb, "catalogue.edit-record"),
+      ),
+    );
+  return rows.map((row) => row.personId);
 }
 
 /**

@@ -15,6 +15,7 @@ export function formState(
   const problem = refused && (intent === undefined || refused.values.intent === intent) ? refused : undefined;
   return {
     errors: problem?.errors,
+    links: problem?.links,
     error: (name: string) => problem?.errors[name],
     value: (name: string) => problem?.values[name] ?? saved[name]?.toString() ?? "",
     /** For boxes: an unticked box is not sent, so after a refusal its absence counts. */

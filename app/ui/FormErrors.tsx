@@ -1,4 +1,5 @@
 import { useEffect, useRef } from "react";
+import { Link } from "react-router";
 import { type FieldError, messagesOf } from "./field-wiring.ts";
 
 export interface FormErrorsProps {
@@ -7,10 +8,12 @@ export interface FormErrorsProps {
   /** The id of a field's control; its name unless said otherwise. */
   idFor?: (name: string) => string;
   title?: string;
+  /** Pages that help to mend it. */
+  links?: readonly { to: string; label: string }[];
 }
 
 /** What is wrong with a form, above it: each line leads to its field. Takes the focus when new errors arrive. */
-export function FormErrors({ errors, idFor = (name) => name, title }: FormErrorsProps) {
+export function FormErrors({ errors, idFor = (name) => name, title, links = [] }: FormErrorsProps) {
   const box = useRef<HTMLDivElement>(null);
   const lines = Object.entries(errors ?? {}).flatMap(([name, error]) =>
     messagesOf(error).map((message) => ({ name, message })),
@@ -33,6 +36,13 @@ export function FormErrors({ errors, idFor = (name) => name, title }: FormErrors
                 {message}
               </a>
             )}
+          </li>
+        ))}
+        {links.map(({ to, label }) => (
+          <li key={to}>
+            <Link to={to} className="underline">
+              {label}
+            </Link>
           </li>
         ))}
       </ul>

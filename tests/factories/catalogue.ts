@@ -9,6 +9,8 @@ import { CreateSource } from "#app/catalogue/source-input.ts";
 import { vetRecord } from "#app/catalogue/vet-record.server.ts";
 import { newId } from "#app/database/new-id.ts";
 import { parseInput } from "#app/parse-input.ts";
+// Touching a record asks that whoever reads it in a seal be registered.
+import "#app/review/register.server.ts";
 
 let count = 0;
 

@@ -142,6 +142,8 @@ test("unknown units, half errors and decimal commas are refused at their field",
   expect(fields({ printed: "1,5 ± 0,1" })).toEqual(["printed"]);
   expect(fields({ printed: "many" })).toEqual(["printed"]);
   expect(fields({ printed: "1 ± 0" })).toEqual(["printed"]);
+  expect(fields({ printed: "1e300 ± 1" })).toEqual(["printed"]);
+  expect(fields({ printed: "1", error: "1e-20" })).toEqual(["error"]);
   expect(fields({ printed: "1", error: "-0.2" })).toEqual(["error"]);
   expect(fields({ epoch: "tomorrow" })).toEqual(["epoch"]);
   expect(read({ printed: "\u22120.40 ± 0.90" })).toMatchObject({

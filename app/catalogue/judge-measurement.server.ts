@@ -36,6 +36,14 @@ export function mayReject(actor: Pick<Actor, "personId" | "roles">, of: { entere
   return mayDo(actor.roles, "record.vet") || (of.enteredBy === actor.personId && of.state !== "vetted");
 }
 
+/** A scientist compares with its source what others entered from memory. */
+export function mayConfirm(
+  actor: Pick<Actor, "personId" | "roles">,
+  of: { enteredBy: string; fromMemory: boolean; sourceId: string | null },
+): boolean {
+  return mayDo(actor.roles, "record.vet") && of.fromMemory && of.sourceId !== null && of.enteredBy !== actor.personId;
+}
+
 /**
  * Sets a measurement aside, with the reason; it stays readable.
  * @throws Forbidden for what others entered, unless a scientist asks; Locked while it is the adopted one

@@ -1,6 +1,6 @@
 import { z } from "zod";
 import { QUANTITIES } from "#app/database/enums.ts";
-import { parsePrinted, plainNumberText } from "./printed-value.ts";
+import { measuredNumberText, parsePrinted } from "./printed-value.ts";
 import { knownUnit, QUANTITY_FACTS } from "./quantities.ts";
 
 const optionalText = (most: number) =>
@@ -55,7 +55,7 @@ export const AddMeasurement = z
     );
     const apart = input.error
       ? attempt(
-          () => plainNumberText(input.error),
+          () => measuredNumberText(input.error),
           (message) => say("error", message),
         )
       : null;

@@ -15,7 +15,7 @@ const PRINTED = new RegExp(String.raw`^(${NUMBER})(?:\s*(?:±|\+\/?-|\+\/?\u2212
 export function parsePrinted(text: string): PrintedValue {
   const match = PRINTED.exec(text.trim());
   if (!match?.[1]) throw new RangeError(`“${text.trim()}” is not a number, nor a number ± its error.`);
-  return { value: plainNumberText(match[1]), error: match[2] === undefined ? null : plainNumberText(match[2]) };
+  return { value: measuredNumberText(match[1]), error: match[2] === undefined ? null : measuredNumberText(match[2]) };
 }
 
 /** One number alone. @throws RangeError */
@@ -29,5 +29,17 @@ export function plainNumberText(text: string): string {
     throw new RangeError(`“${trimmed}” is not a number.`);
   }
   if (plain.length > 40) throw new RangeError("A number of at most 40 characters.");
+  return plain;
+}
+
+const LARGEST = 1e12;
+
+/** One number that can have been measured: in no unit known here is anything beyond a million million or below its inverse. @throws RangeError */
+export function measuredNumberText(text: string): string {
+  const plain = plainNumberText(text);
+  const size = Math.abs(Number(plain));
+  if (size > LARGEST || (size !== 0 && size < 1 / LARGEST)) {
+    throw new RangeError(`“${text.trim()}” is beyond anything that is measured in these units.`);
+  }
   return plain;
 }

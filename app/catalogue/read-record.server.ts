@@ -1,12 +1,14 @@
 import { asc, eq } from "drizzle-orm";
 import type { Actor } from "#app/audit/actor.ts";
 import { db } from "#app/database/db.server.ts";
+import { newId } from "#app/database/new-id.ts";
 import { measurement, record, recordIdentifier, recordName, source } from "#app/database/schema/catalogue.ts";
 import { person } from "#app/database/schema/people.ts";
 import { NotFound } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
 import { shortCitation } from "./citation.ts";
 import { distanceOf, priorOf } from "./distance-of.ts";
+import { mayConfirm, mayReject } from "./judge-measurement.server.ts";
 import { readGate } from "./vet-record.server.ts";
 import { missingForVetting } from "./vetting-gate.ts";
 
@@ -22,7 +24,7 @@ export async function readRecord(actor: Actor | null, recordId: string) {
       .from(recordIdentifier)
       .where(eq(recordIdentifier.recordId, recordId))
       .orderBy(asc(recordIdentifier.id)),
-    readLedger(recordId),
+    readLedger(actor, recordId),
     readSourceChoices(actor),
     found.vettedBy ? db().select({ name: person.name }).from(person).where(eq(person.id, found.vettedBy)) : [],
   ]);
@@ -48,7 +50,8 @@ export async function readRecord(actor: Actor | null, recordId: string) {
   };
 }
 
-async function readLedger(recordId: string) {
+/** Every measurement in the order of entering, and what this person may do with each. */
+async function readLedger(actor: Actor, recordId: string) {
   const rows = await db()
     .select({ measurement, source, enteredBy: person.name })
     .from(measurement)
@@ -59,8 +62,9 @@ async function readLedger(recordId: string) {
   return rows.map(({ measurement: one, source: from, enteredBy }) => ({
     ...one,
     createdAt: one.createdAt.toISOString(),
-    enteredById: one.enteredBy,
     enteredBy,
+    mayReject: mayReject(actor, one),
+    mayConfirm: mayConfirm(actor, one),
     source: from ? { id: from.id, citation: shortCitation(from), bibcode: from.bibcode, doi: from.doi } : null,
   }));
 }
@@ -70,4 +74,10 @@ export async function readSourceChoices(actor: Actor | null) {
   authorise(actor, "catalogue.read");
   const rows = await db().select().from(source).orderBy(asc(source.authors), asc(source.year));
   return rows.map((row) => ({ id: row.id, citation: shortCitation(row), bibcode: row.bibcode, doi: row.doi }));
+}
+
+/** What the form of a new record needs: the sources, and the id that makes it one form. */
+export async function readNewRecord(actor: Actor | null) {
+  authorise(actor, "record.write");
+  return { sources: await readSourceChoices(actor), submission: newId() };
 }

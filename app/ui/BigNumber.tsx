@@ -8,10 +8,17 @@ interface BigNumberProps {
   unit?: string;
   /** The range in words, under the number, in the colour of uncertainty. */
   range?: string;
-  size?: "large" | "medium";
+  /** "range" is for two numbers in one line. */
+  size?: "large" | "range" | "medium";
   /** Usually a `SpreadBar`. */
   children?: ReactNode;
 }
+
+const SIZES = {
+  large: "text-4xl forced-colors:leading-[1.3] md:text-5xl",
+  range: "text-3xl",
+  medium: "text-2xl tracking-[-0.02em]",
+};
 
 /** A number set larger than its label. It stands alone, so its numerals are proportional: the face's tabular 1 is all foot. */
 export function BigNumber({ label, value, unit, range, size = "large", children }: BigNumberProps) {
@@ -19,20 +26,13 @@ export function BigNumber({ label, value, unit, range, size = "large", children 
     <div>
       <p className="label">{label}</p>
       <p className="flex flex-wrap items-baseline gap-x-2 font-head">
-        <span
-          className={classes(
-            "font-medium tracking-[-0.03em]",
-            size === "large" ? "text-4xl forced-colors:leading-[1.3] md:text-5xl" : "text-2xl tracking-[-0.02em]",
-          )}
-        >
-          {value}
-        </span>
+        <span className={classes("font-medium tracking-[-0.03em]", SIZES[size])}>{value}</span>
         {unit ? (
-          <span className={classes("text-ink-soft", size === "large" ? "text-xl" : "text-lg")}>{unit}</span>
+          <span className={classes("text-ink-soft", size === "medium" ? "text-lg" : "text-xl")}>{unit}</span>
         ) : null}
       </p>
       {range ? (
-        <p className={classes("font-head text-vermilion", size === "large" ? "text-lg" : "text-base")}>{range}</p>
+        <p className={classes("font-head text-vermilion", size === "medium" ? "text-base" : "text-lg")}>{range}</p>
       ) : null}
       {children ? <div className="mt-3">{children}</div> : null}
     </div>

@@ -1,7 +1,7 @@
 import { parseDeclination, parseRightAscension } from "#app/astrometry/coordinates.ts";
 import type { Quantity } from "#app/database/enums.ts";
 import { QUANTITIES } from "#app/database/enums.ts";
-import { plainNumberText } from "../printed-value.ts";
+import { measuredNumberText } from "../printed-value.ts";
 import { type Identifier, parseIdentifier } from "../record-input.ts";
 import type { Mapping } from "./mapping.ts";
 import type { ColumnUse } from "./meanings.ts";
@@ -114,7 +114,7 @@ function readMeasurement(reader: Reader, quantity: Quantity): PlannedMeasurement
   if (at < 0 || cell(at) === "") return [];
   const number = (place: number) => {
     try {
-      return plainNumberText(cell(place));
+      return measuredNumberText(cell(place));
     } catch (problem) {
       say(place, problem instanceof Error ? problem.message : "Not a number.");
       return null;

@@ -18,7 +18,7 @@ export function SourceForm({ actionData, saved = {}, hidden = {}, cancelTo }: So
   const field = (name: string) => ({ name, defaultValue: form.value(name), error: form.error(name) });
   return (
     <Form method="post" noValidate className="grid max-w-words gap-5">
-      <FormErrors errors={form.errors} />
+      <FormErrors errors={form.errors} links={form.links} />
       {Object.entries(hidden).map(([name, value]) => (
         <input key={name} type="hidden" name={name} value={value} />
       ))}

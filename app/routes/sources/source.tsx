@@ -10,6 +10,8 @@ import { Disclosure } from "#app/ui/Disclosure.tsx";
 import { PageHead } from "#app/ui/PageHead.tsx";
 import { StateMark } from "#app/ui/StateMark.tsx";
 import { Table } from "#app/ui/Table.tsx";
+import { readAgainAfterConflict } from "../after-conflict.ts";
+import { TheirsAndYours } from "../TheirsAndYours.tsx";
 import type { Route } from "./+types/source";
 import { SourceForm } from "./SourceForm.tsx";
 
@@ -27,9 +29,23 @@ export const action = answeredAction(async ({ request, context, params }: Route.
   return redirect(`/sources/${params.source}`);
 });
 
+export const shouldRevalidate = readAgainAfterConflict;
+
+const LABELS: Record<string, string> = {
+  title: "Title",
+  authors: "Authors",
+  year: "Year",
+  designation: "Catalogue designation",
+  bibcode: "Bibcode",
+  doi: "DOI",
+  note: "Note",
+};
+
 export default function Source({ loaderData, actionData }: Route.ComponentProps) {
   const { source, users, mayWrite } = loaderData;
   const { title, authors, year, designation, bibcode, doi, note } = source;
+  const saved = { title, authors, year, designation, bibcode, doi, note };
+  const conflict = actionData?.problem.kind === "conflict" ? actionData.problem.values : null;
   return (
     <>
       <PageHead title={source.citation} crumbs={[{ label: "Sources", to: "/sources" }]} subtitle={bibcode ?? doi} />
@@ -64,9 +80,10 @@ export default function Source({ loaderData, actionData }: Route.ComponentProps)
         />
         {mayWrite ? (
           <Disclosure summary="Correct this source" open={Boolean(actionData)}>
+            {conflict ? <TheirsAndYours labels={LABELS} theirs={saved} yours={conflict} /> : null}
             <SourceForm
               actionData={actionData}
-              saved={{ title, authors, year, designation, bibcode, doi, note }}
+              saved={saved}
               hidden={{ sourceId: source.id, version: source.version }}
               cancelTo={`/sources/${source.id}`}
             />

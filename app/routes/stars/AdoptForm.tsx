@@ -35,6 +35,13 @@ interface AdoptFormProps {
   actionData: FormProblem | undefined;
 }
 
+/** Until a prior is chosen (or without JavaScript) it may be either. */
+const SCALE_LABELS: Record<string, string> = {
+  edsd: "Its length",
+  "uniform-density": "Its limit",
+  "uniform-distance": "Its limit",
+};
+
 const labelOf = ({ value, error, unit, source }: Choice) =>
   `${measurementText({ value, error, unit, language: "en" })}, ${source?.citation ?? "no source yet"}`;
 
@@ -75,7 +82,7 @@ export function AdoptForm({ record, choices, actionData }: AdoptFormProps) {
           onChange={(event) => setPrior(event.currentTarget.value)}
         />
         <Field
-          label={prior === "edsd" ? "Its length" : "Its limit"}
+          label={SCALE_LABELS[prior] ?? "Its length or limit"}
           unit="pc"
           inputMode="decimal"
           hint="Only with a prior."

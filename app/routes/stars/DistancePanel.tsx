@@ -1,21 +1,25 @@
 import type { DistanceReply } from "#app/catalogue/answer-distance.ts";
 import type { DistanceCurve } from "#app/catalogue/distance-curve.ts";
+import { lightLeftFigure } from "#app/figures/light-left.ts";
 import { percentText, plainNumber, significantNumber } from "#app/figures/office-numbers.ts";
 import { distanceFigure } from "#app/figures/range-figure.ts";
 import { axisTicks } from "#app/ui/axis-ticks.ts";
 import { BigNumber } from "#app/ui/BigNumber.tsx";
 import { SpreadBar } from "#app/ui/SpreadBar.tsx";
 import { fitDomain } from "#app/ui/spread-geometry.ts";
+import { Arithmetic } from "./Arithmetic.tsx";
 import { DistancePlot } from "./DistancePlot.tsx";
 import { PRIOR_WORDS, REGIME_WORDS } from "./words.ts";
 
 interface DistancePanelProps {
   distance: { reply: DistanceReply; curve: DistanceCurve | null } | null;
   name: string;
+  /** The calendar year in which a visitor sees the light. */
+  seenInYear: number;
 }
 
 /** The number that everything else is for: as large as the regime allows, its range beside it. */
-export function DistancePanel({ distance, name }: DistancePanelProps) {
+export function DistancePanel({ distance, name, seenInYear }: DistancePanelProps) {
   if (!distance) {
     return (
       <div>
@@ -50,7 +54,10 @@ export function DistancePanel({ distance, name }: DistancePanelProps) {
         label={label}
         value={figure.value ?? `${figure.low} to ${figure.high}`}
         unit={figure.unit}
-        range={figure.value ? `${figure.low} to ${figure.high}, 68 %` : "68 %"}
+        range={[figure.value ? `${figure.low} to ${figure.high}` : null, "68 %", figure.note]
+          .filter(Boolean)
+          .join(", ")}
+        size={figure.value ? "large" : "range"}
       >
         <SpreadBar
           {...spread}
@@ -65,14 +72,36 @@ export function DistancePanel({ distance, name }: DistancePanelProps) {
         </p>
       </BigNumber>
       {reply.warning ? <p className="text-vermilion">{reply.warning}</p> : null}
-      {curve ? <DistancePlot curve={curve} low={reply.pc.low} high={reply.pc.high} /> : null}
-      <div>
-        <p className="label">What a visitor reads</p>
-        <p className="text-lg">
-          {name} is <span className="border-b-2 border-vermilion">{figure.text}</span> away.
-        </p>
-        <p className="text-sm text-ink-soft">fr {reply.text.fr}</p>
-      </div>
+      {curve ? <DistancePlot curve={curve} low={reply.pc.low} value={reply.pc.value} high={reply.pc.high} /> : null}
+      <VisitorWords reply={reply} name={name} figure={figure.text} seenInYear={seenInYear} />
+      <Arithmetic reply={reply} />
+    </div>
+  );
+}
+
+interface VisitorWordsProps {
+  reply: DistanceReply;
+  name: string;
+  figure: string;
+  seenInYear: number;
+}
+
+/** The figures as scenes bind them, in a plain sentence. */
+function VisitorWords({ reply, name, figure, seenInYear }: VisitorWordsProps) {
+  const { ly, method, regime } = reply;
+  if (!ly || !method) return null;
+  const left = lightLeftFigure({ distanceLy: ly, seenInYear, regime, method, form: "value", language: "en" });
+  const look = "border-b-2 border-vermilion";
+  return (
+    <div>
+      <p className="label">What a visitor reads</p>
+      <p className="text-lg">
+        {name} is <span className={look}>{figure}</span> away. The light seen this year left{" "}
+        <span className={look}>{left.text}</span>.
+      </p>
+      <p className="text-sm text-ink-soft">
+        fr <span lang="fr">{reply.text?.fr}</span>
+      </p>
     </div>
   );
 }

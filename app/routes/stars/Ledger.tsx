@@ -1,23 +1,22 @@
-import { Form, Link } from "react-router";
+import { Link } from "react-router";
 import { QUANTITY_FACTS } from "#app/catalogue/quantities.ts";
 import type { readRecord } from "#app/catalogue/read-record.server.ts";
 import { epochText, measurementText } from "#app/figures/office-numbers.ts";
-import { Disclosure } from "#app/ui/Disclosure.tsx";
-import { Field } from "#app/ui/Field.tsx";
+import type { FormProblem } from "#app/http.server.ts";
 import { SpreadBar } from "#app/ui/SpreadBar.tsx";
 import { StateMark } from "#app/ui/StateMark.tsx";
-import { SubmitButton } from "#app/ui/SubmitButton.tsx";
 import { type Domain, fitDomain } from "#app/ui/spread-geometry.ts";
 import { type Column, Table } from "#app/ui/Table.tsx";
-import { MEASUREMENT_STATE } from "./words.ts";
+import { JudgeForm } from "./JudgeForm.tsx";
+import { regimeOfParallax } from "./said.ts";
+import { MEASUREMENT_STATE, REGIME_WORDS } from "./words.ts";
 
 type Measured = Awaited<ReturnType<typeof readRecord>>["ledger"][number];
 
 interface LedgerProps {
   ledger: readonly Measured[];
   adoptedId: string | null;
-  mayVet: boolean;
-  personId: string;
+  actionData: FormProblem | undefined;
 }
 
 const spreadOf = (one: Measured) => {
@@ -25,8 +24,14 @@ const spreadOf = (one: Measured) => {
   return { value: one.valueCanonical, low: one.valueCanonical - error, high: one.valueCanonical + error };
 };
 
-/** A log axis has room for what is above zero only. */
-const drawable = (one: Measured) => one.errorCanonical !== null && one.valueCanonical > one.errorCanonical;
+/** A log axis has room for what is above zero only. What was set aside would only stretch it. */
+const drawable = (one: Measured) =>
+  one.state !== "rejected" && one.errorCanonical !== null && one.valueCanonical > one.errorCanonical;
+
+function whyNoBar(row: Measured): string {
+  if (row.state === "rejected") return "";
+  return row.error === null ? "no error, no range" : "reaches zero";
+}
 
 export function Ledger(props: LedgerProps) {
   const parallaxes = props.ledger.filter((one) => one.quantity === "parallax");
@@ -57,8 +62,16 @@ function Printed({ row }: { row: Measured }) {
     <>
       {valueText(row)}
       <div className="text-sm font-normal text-ink-soft">as printed “{row.rawText}”</div>
+      {row.quantity === "parallax" ? <RegimeLine row={row} /> : null}
     </>
   );
+}
+
+/** What may be said from this parallax, were it adopted. */
+function RegimeLine({ row }: { row: Measured }) {
+  const regime = regimeOfParallax(row);
+  const words = regime === "no-error" ? "cannot be adopted" : REGIME_WORDS[regime];
+  return <div className="text-sm font-normal text-ink-soft">{words}</div>;
 }
 
 function SourceCell({ row }: { row: Measured }) {
@@ -81,14 +94,8 @@ function SourceCell({ row }: { row: Measured }) {
 function StateCell({
   row,
   adopted,
-  mayVet,
-  personId,
-}: {
-  row: Measured;
-  adopted: boolean;
-  mayVet: boolean;
-  personId: string;
-}) {
+  actionData,
+}: { row: Measured; adopted: boolean } & Pick<LedgerProps, "actionData">) {
   const { word, tone } = MEASUREMENT_STATE[row.state];
   return (
     <div className="grid justify-items-start gap-1 max-md:justify-items-end">
@@ -98,43 +105,22 @@ function StateCell({
         {row.fromMemory ? <StateMark tone="person">from memory</StateMark> : null}
       </span>
       {row.stateReason ? <span className="text-sm text-ink-soft">{row.stateReason}</span> : null}
-      {mayVet && row.state !== "rejected" ? (
-        <Judge row={row} adopted={adopted} own={row.enteredById === personId} />
-      ) : null}
+      {row.state === "rejected" ? null : (
+        <JudgeForm
+          what={`${QUANTITY_FACTS[row.quantity].label} ${valueText(row)}`}
+          measurement={row}
+          mayConfirm={row.mayConfirm}
+          mayReject={row.mayReject && !adopted}
+          actionData={actionData}
+        />
+      )}
     </div>
   );
 }
 
-/** What a scientist may do with a measurement: compare it with its source, or set it aside. */
-function Judge({ row, adopted, own }: { row: Measured; adopted: boolean; own: boolean }) {
-  const mayConfirm = row.fromMemory && !own && row.source;
-  if (!mayConfirm && adopted) return null;
-  return (
-    <Disclosure summary="Judge it" className="w-full border-b-0 text-left">
-      <Form method="post" className="grid gap-3">
-        <input type="hidden" name="measurementId" value={row.id} />
-        <input type="hidden" name="version" value={row.version} />
-        <Field id={`why-${row.id}`} label="What you found" name="reason" required />
-        <div className="flex flex-wrap gap-2">
-          {mayConfirm ? (
-            <SubmitButton intent="confirm" look="quiet">
-              It agrees with its source
-            </SubmitButton>
-          ) : null}
-          {adopted ? null : (
-            <SubmitButton intent="reject" look="danger">
-              Reject it
-            </SubmitButton>
-          )}
-        </div>
-      </Form>
-    </Disclosure>
-  );
-}
-
-function parallaxColumns({ adoptedId, mayVet, personId }: LedgerProps, domain: Domain): Column<Measured>[] {
+function parallaxColumns({ adoptedId, actionData }: LedgerProps, domain: Domain): Column<Measured>[] {
   return [
-    { id: "value", head: "Value", rowHead: true, cell: (row) => <Printed row={row} /> },
+    { id: "value", head: "Value", rowHead: true, className: "md:min-w-44", cell: (row) => <Printed row={row} /> },
     {
       id: "spread",
       head: "Spread",
@@ -144,27 +130,33 @@ function parallaxColumns({ adoptedId, mayVet, personId }: LedgerProps, domain: D
         drawable(row) ? (
           <SpreadBar {...spreadOf(row)} domain={domain} muted={row.id !== adoptedId} label={valueText(row)} />
         ) : (
-          <span className="text-sm text-ink-soft">{row.error === null ? "no error" : "reaches zero"}</span>
+          <span className="text-sm text-ink-soft">{whyNoBar(row)}</span>
         ),
     },
     { id: "source", head: "Source", cell: (row) => <SourceCell row={row} /> },
     {
       id: "state",
       head: "State",
-      cell: (row) => <StateCell row={row} adopted={row.id === adoptedId} mayVet={mayVet} personId={personId} />,
+      cell: (row) => <StateCell row={row} adopted={row.id === adoptedId} actionData={actionData} />,
     },
   ];
 }
 
-function otherColumns({ mayVet, personId }: LedgerProps): Column<Measured>[] {
+function otherColumns({ actionData }: LedgerProps): Column<Measured>[] {
   return [
-    { id: "quantity", head: "Quantity", rowHead: true, cell: (row) => QUANTITY_FACTS[row.quantity].label },
+    {
+      id: "quantity",
+      head: "Quantity",
+      rowHead: true,
+      className: "md:min-w-28",
+      cell: (row) => QUANTITY_FACTS[row.quantity].label,
+    },
     { id: "value", head: "Value", numeric: true, cell: (row) => <Printed row={row} /> },
     { id: "source", head: "Source", cell: (row) => <SourceCell row={row} /> },
     {
       id: "state",
       head: "State",
-      cell: (row) => <StateCell row={row} adopted={false} mayVet={mayVet} personId={personId} />,
+      cell: (row) => <StateCell row={row} adopted={false} actionData={actionData} />,
     },
   ];
 }

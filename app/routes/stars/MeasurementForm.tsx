@@ -1,6 +1,6 @@
 import { useState } from "react";
 import { Form } from "react-router";
-import { QUANTITY_FACTS } from "#app/catalogue/quantities.ts";
+import { QUANTITY_FACTS, toCanonical } from "#app/catalogue/quantities.ts";
 import { QUANTITIES, type Quantity } from "#app/database/enums.ts";
 import type { FormProblem } from "#app/http.server.ts";
 import { Checkbox } from "#app/ui/Checkbox.tsx";
@@ -12,7 +12,6 @@ import { formState } from "../form-state.ts";
 import { LiveDistance } from "./LiveDistance.tsx";
 
 const UNITS = [...new Set(QUANTITIES.flatMap((quantity) => Object.keys(QUANTITY_FACTS[quantity].units)))];
-const MAS: Record<string, number> = QUANTITY_FACTS.parallax.units;
 
 interface MeasurementFormProps {
   recordId: string;
@@ -24,8 +23,9 @@ interface MeasurementFormProps {
 function typedNumbers(printed: string, error: string, unit: string) {
   const [value = "", apart = ""] = printed.replaceAll("\u2212", "-").split(/±|\+\/?-/);
   const inMas = (text: string) => {
-    const number = Number(text.trim());
-    return text.trim() === "" || !Number.isFinite(number) ? text.trim() : String(number * (MAS[unit] ?? 1));
+    const known =
+      text.trim() !== "" && Number.isFinite(Number(text)) && Object.hasOwn(QUANTITY_FACTS.parallax.units, unit);
+    return known ? String(toCanonical("parallax", text.trim(), unit)) : text.trim();
   };
   return { parallax: inMas(value), error: inMas(apart || error) };
 }

@@ -23,7 +23,7 @@ export function RecordForm({ actionData, saved, sources, hidden = {}, cancelTo }
   const field = (name: string) => ({ name, defaultValue: form.value(name), error: form.error(name) });
   return (
     <Form method="post" noValidate className="grid gap-10">
-      <FormErrors errors={form.errors} />
+      <FormErrors errors={form.errors} links={form.links} />
       {Object.entries(hidden).map(([name, value]) => (
         <input key={name} type="hidden" name={name} value={value} />
       ))}

@@ -2,15 +2,18 @@ import { redirect } from "react-router";
 import { editRecord } from "#app/catalogue/edit-record.server.ts";
 import { readRecord } from "#app/catalogue/read-record.server.ts";
 import { EditRecord } from "#app/catalogue/record-input.ts";
+import type { RecordKind } from "#app/database/enums.ts";
 import { answered, answeredAction, readForm } from "#app/http.server.ts";
 import { parseInput } from "#app/parse-input.ts";
 import { authorise } from "#app/people/authorise.ts";
 import { requireActor } from "#app/people/require-actor.server.ts";
-import { DiffRow } from "#app/ui/DiffRow.tsx";
 import { Notice } from "#app/ui/Notice.tsx";
 import { PageHead } from "#app/ui/PageHead.tsx";
+import { readAgainAfterConflict } from "../after-conflict.ts";
+import { TheirsAndYours } from "../TheirsAndYours.tsx";
 import type { Route } from "./+types/edit";
 import { RecordForm } from "./RecordForm.tsx";
+import { KIND_WORDS } from "./words.ts";
 
 export const meta: Route.MetaFunction = ({ loaderData }) => [{ title: `Edit ${loaderData?.saved.name} · Alidade` }];
 
@@ -38,6 +41,8 @@ export const action = answeredAction(async ({ request, context, params }: Route.
   return redirect(`/stars/${params.record}?said=kept`);
 });
 
+export const shouldRevalidate = readAgainAfterConflict;
+
 const LABELS: Record<string, string> = {
   name: "Name",
   kind: "Kind",
@@ -51,8 +56,14 @@ const LABELS: Record<string, string> = {
   positionNote: "Note on the position",
 };
 
+const isKind = (text: string): text is RecordKind => Object.hasOwn(KIND_WORDS, text);
+
 export default function EditRecordPage({ loaderData, actionData }: Route.ComponentProps) {
   const { id, version, state, saved, sources } = loaderData;
+  const say = (field: string, value: string) => {
+    if (field === "positionSourceId") return sources.find((one) => one.id === value)?.citation ?? value;
+    return field === "kind" && isKind(value) ? KIND_WORDS[value] : value;
+  };
   const conflict = actionData?.problem.kind === "conflict" ? actionData.problem.values : null;
   return (
     <>
@@ -68,7 +79,7 @@ export default function EditRecordPage({ loaderData, actionData }: Route.Compone
           This record is vetted. A change makes it a draft again, and seals that read it may end.
         </Notice>
       ) : null}
-      {conflict ? <Merge saved={saved} typed={conflict} /> : null}
+      {conflict ? <TheirsAndYours labels={LABELS} theirs={saved} yours={conflict} say={say} /> : null}
       <RecordForm
         actionData={actionData}
         saved={saved}
@@ -77,27 +88,5 @@ export default function EditRecordPage({ loaderData, actionData }: Route.Compone
         cancelTo={`/stars/${id}`}
       />
     </>
-  );
-}
-
-/** Somebody else saved first: what they kept beside what was typed. Saving again keeps the form as it stands below. */
-function Merge({ saved, typed }: { saved: Record<string, string | null>; typed: Record<string, string> }) {
-  const differing = Object.keys(LABELS).filter(
-    (name) => (saved[name] ?? "") !== (typed[name] ?? "").replace(/\r\n/g, "\n"),
-  );
-  return (
-    <Notice tone="warning" title="Somebody else saved this record while you were typing">
-      <p className="mb-3">
-        Your words are still in the form below. Take over from theirs what you want to keep, then save again.
-      </p>
-      {differing.map((name) => (
-        <DiffRow
-          key={name}
-          label={LABELS[name] ?? name}
-          before={`theirs: ${saved[name] ?? "nothing"}`}
-          after={`yours: ${typed[name] ?? ""}`}
-        />
-      ))}
-    </Notice>
   );
 }

@@ -1,4 +1,4 @@
-import { Form, Link, redirect } from "react-router";
+import { Link, redirect } from "react-router";
 import { addMeasurement } from "#app/catalogue/add-measurement.server.ts";
 import { adoptParallax } from "#app/catalogue/adopt-parallax.server.ts";
 import { answerDistance } from "#app/catalogue/answer-distance.ts";
@@ -21,17 +21,17 @@ import { LinkButton } from "#app/ui/LinkButton.tsx";
 import { Notice } from "#app/ui/Notice.tsx";
 import { PageHead } from "#app/ui/PageHead.tsx";
 import { StateMark } from "#app/ui/StateMark.tsx";
-import { SubmitButton } from "#app/ui/SubmitButton.tsx";
 import { Table } from "#app/ui/Table.tsx";
-import { TextArea } from "#app/ui/TextArea.tsx";
 import { Time } from "#app/ui/Time.tsx";
-import { formState } from "../form-state.ts";
+import { readAgainAfterConflict } from "../after-conflict.ts";
 import type { Route } from "./+types/star";
 import { AdoptForm } from "./AdoptForm.tsx";
 import { DistancePanel } from "./DistancePanel.tsx";
 import { Ledger } from "./Ledger.tsx";
 import { MeasurementForm } from "./MeasurementForm.tsx";
 import { PositionList } from "./PositionList.tsx";
+import { SAID, saidOfMeasurement } from "./said.ts";
+import { VettingPanel } from "./VettingPanel.tsx";
 
 export const meta: Route.MetaFunction = ({ loaderData }) => [
   { title: `${loaderData?.record.name ?? "Star"} · Alidade` },
@@ -56,7 +56,7 @@ export const loader = answered(async ({ context, params, request }: Route.Loader
           curve: distanceCurve(answer, prior),
         }
       : null,
-    personId: actor.personId,
+    seenInYear: new Date().getUTCFullYear(),
     mayWrite: mayDo(actor.roles, "record.write"),
     mayVet: mayDo(actor.roles, "record.vet"),
     said: new URL(request.url).searchParams.get("said"),
@@ -68,9 +68,11 @@ export const action = answeredAction(async ({ request, context, params }: Route.
   const form = await readForm(request);
   const done = (said: string) => redirect(`/stars/${params.record}?said=${said}`);
   switch (form.get("intent")) {
-    case "measure":
-      await addMeasurement(actor, parseInput(AddMeasurement, form));
-      return done("measured");
+    case "measure": {
+      const measured = parseInput(AddMeasurement, form);
+      await addMeasurement(actor, measured);
+      return done(saidOfMeasurement(measured));
+    }
     case "adopt":
       await adoptParallax(actor, parseInput(AdoptParallax, form));
       return done("adopted");
@@ -91,21 +93,13 @@ export const action = answeredAction(async ({ request, context, params }: Route.
   }
 });
 
-const SAID: Record<string, string> = {
-  kept: "The record is kept.",
-  measured: "The measurement is proposed. Nothing is adopted by that.",
-  adopted: "The parallax is adopted.",
-  confirmed: "The value is no longer from memory.",
-  rejected: "The measurement is set aside.",
-  vetted: "The record is vetted.",
-  unvetted: "The record is a draft again.",
-};
+export const shouldRevalidate = readAgainAfterConflict;
 
 export default function Star({ loaderData, actionData }: Route.ComponentProps) {
   const { record, said, mayWrite, ledger, adopted, sources, uses } = loaderData;
   const choices = ledger.filter((one) => one.quantity === "parallax" && one.state !== "rejected" && one.error !== null);
   const refusedIntent = actionData?.problem.values.intent;
-  const elsewhere = formState(actionData).errors && !["measure", "adopt"].includes(refusedIntent ?? "");
+  const elsewhere = actionData && !["measure", "adopt"].includes(refusedIntent ?? "");
   return (
     <>
       <PageHead
@@ -121,26 +115,21 @@ export default function Star({ loaderData, actionData }: Route.ComponentProps) {
           ) : null
         }
       />
-      {said && SAID[said] && !actionData ? <Notice tone="success">{SAID[said]}</Notice> : null}
+      {said && Object.hasOwn(SAID, said) && !actionData ? <Notice tone="success">{SAID[said]}</Notice> : null}
       {elsewhere ? <FormErrors errors={actionData?.problem.errors} idFor={() => "main"} /> : null}
       <div className="grid gap-14 xl:grid-cols-[1fr_2fr]">
         <div className="grid content-start gap-10">
-          <DistancePanel distance={loaderData.distance} name={record.name} />
+          <DistancePanel distance={loaderData.distance} name={record.name} seenInYear={loaderData.seenInYear} />
           <PositionList record={record} source={loaderData.positionSource} />
         </div>
         <div className="grid content-start gap-10">
-          <Ledger
-            ledger={ledger}
-            adoptedId={adopted?.id ?? null}
-            mayVet={loaderData.mayVet}
-            personId={loaderData.personId}
-          />
+          <Ledger ledger={ledger} adoptedId={adopted?.id ?? null} actionData={actionData} />
           <Uses uses={uses} />
-          <Vetting {...loaderData} />
+          <VettingPanel {...loaderData} actionData={actionData} />
           {mayWrite ? (
             <div>
               <Disclosure summary="Add a measurement" open={refusedIntent === "measure" || ledger.length === 0}>
-                <MeasurementForm recordId={record.id} actionData={actionData} sources={sources} />
+                <MeasurementForm key={ledger.length} recordId={record.id} actionData={actionData} sources={sources} />
               </Disclosure>
               {choices.length > 0 ? (
                 <Disclosure
@@ -212,52 +201,5 @@ function Uses({ uses }: Pick<Data, "uses">) {
         { id: "state", head: "Exhibit is", cell: (row) => <StateMark tone="none">{row.state}</StateMark> },
       ]}
     />
-  );
-}
-
-function Vetting({ record, missing, isOwnWork, mayVet }: Data) {
-  const hidden = (
-    <>
-      <input type="hidden" name="recordId" value={record.id} />
-      <input type="hidden" name="version" value={record.version} />
-    </>
-  );
-  if (record.state === "vetted") {
-    if (!mayVet) return null;
-    return (
-      <Disclosure summary="Take the vetting back">
-        <Form method="post" className="grid max-w-words gap-4">
-          {hidden}
-          <TextArea label="Why" name="reason" rows={2} required />
-          <SubmitButton intent="unvet" look="danger" className="justify-self-start">
-            Make it a draft again
-          </SubmitButton>
-        </Form>
-      </Disclosure>
-    );
-  }
-  return (
-    <section>
-      <h2 className="mb-2">Before it can be vetted</h2>
-      {missing.length > 0 ? (
-        <ul className="list-disc pl-5">
-          {missing.map((one) => (
-            <li key={one.field}>{one.message}</li>
-          ))}
-        </ul>
-      ) : (
-        <p>Nothing is missing. It waits for a scientist who entered none of it.</p>
-      )}
-      {mayVet && missing.length === 0 ? (
-        isOwnWork ? (
-          <p className="mt-2 text-ink-soft">You have a hand in it, so somebody else has to vet it.</p>
-        ) : (
-          <Form method="post" className="mt-4">
-            {hidden}
-            <SubmitButton intent="vet">Vet this record</SubmitButton>
-          </Form>
-        )
-      ) : null}
-    </section>
   );
 }

@@ -62,7 +62,7 @@ export default function Stars({ loaderData }: Route.ComponentProps) {
           ) : null
         }
       />
-      <Form method="get" role="search" className="mb-8 flex flex-wrap items-end gap-4">
+      <Form method="get" action="/stars" role="search" className="mb-8 flex flex-wrap items-end gap-4">
         <Field
           label="Name or identifier"
           name="q"

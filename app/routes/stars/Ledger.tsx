@@ -5,8 +5,9 @@ import { epochText, measurementText } from "#app/figures/office-numbers.ts";
 import type { FormProblem } from "#app/http.server.ts";
 import { SpreadBar } from "#app/ui/SpreadBar.tsx";
 import { StateMark } from "#app/ui/StateMark.tsx";
-import { type Domain, fitDomain } from "#app/ui/spread-geometry.ts";
+import type { Domain } from "#app/ui/spread-geometry.ts";
 import { type Column, Table } from "#app/ui/Table.tsx";
+import { commonDomain } from "./common-domain.ts";
 import { JudgeForm } from "./JudgeForm.tsx";
 import { regimeOfParallax } from "./said.ts";
 import { MEASUREMENT_STATE, REGIME_WORDS } from "./words.ts";
@@ -36,7 +37,7 @@ function whyNoBar(row: Measured): string {
 export function Ledger(props: LedgerProps) {
   const parallaxes = props.ledger.filter((one) => one.quantity === "parallax");
   const others = props.ledger.filter((one) => one.quantity !== "parallax");
-  const domain = fitDomain(parallaxes.filter(drawable).map(spreadOf), 0.2);
+  const domain = commonDomain(parallaxes.filter(drawable).map(spreadOf), 0.2);
   return (
     <div className="grid gap-10">
       <Table
@@ -118,7 +119,7 @@ function StateCell({
   );
 }
 
-function parallaxColumns({ adoptedId, actionData }: LedgerProps, domain: Domain): Column<Measured>[] {
+function parallaxColumns({ adoptedId, actionData }: LedgerProps, domain: Domain | undefined): Column<Measured>[] {
   return [
     { id: "value", head: "Value", rowHead: true, className: "md:min-w-44", cell: (row) => <Printed row={row} /> },
     {

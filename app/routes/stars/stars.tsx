@@ -15,9 +15,10 @@ import { Pager } from "#app/ui/Pager.tsx";
 import { Select } from "#app/ui/Select.tsx";
 import { SpreadBar } from "#app/ui/SpreadBar.tsx";
 import { StateMark } from "#app/ui/StateMark.tsx";
-import { type Domain, fitDomain } from "#app/ui/spread-geometry.ts";
+import type { Domain } from "#app/ui/spread-geometry.ts";
 import { type Column, Table } from "#app/ui/Table.tsx";
 import type { Route } from "./+types/stars";
+import { commonDomain } from "./common-domain.ts";
 import { KIND_WORDS, REGIME_WORDS } from "./words.ts";
 
 export const meta: Route.MetaFunction = () => [{ title: "Stars · Alidade" }];
@@ -45,7 +46,7 @@ type Row = Route.ComponentProps["loaderData"]["rows"][number];
 
 export default function Stars({ loaderData }: Route.ComponentProps) {
   const { rows, total, query, mayWrite } = loaderData;
-  const domain = fitDomain(
+  const domain = commonDomain(
     rows.flatMap((row) => (row.distancePc ? [inLightYears(row.distancePc)] : [])),
     0.1,
   );
@@ -118,7 +119,7 @@ function inLightYears({ value, low, high }: NonNullable<Row["distancePc"]>) {
   return { value: to(value), low: to(low), high: to(high) };
 }
 
-function columns(domain: Domain): Column<Row>[] {
+function columns(domain: Domain | undefined): Column<Row>[] {
   return [
     {
       id: "name",

@@ -52,8 +52,8 @@ export const NEAREST_SUNS: SeedExhibit = {
         { key: "sirius", of: "Sirius", form: "value" },
         { key: "altair", of: "Altair", form: "value-and-range" },
       ],
-      en: "The Sun has quiet neighbours. Barnard’s Star is {barnard} away, and you would need a telescope to see it. Sirius, at {sirius}, is the brightest star of our night.\n\nThe farthest star of this little crowd that is easy to find is Altair, {altair}.",
-      fr: "Le Soleil a des voisins discrets. L’étoile de Barnard est à {barnard} : il faut un télescope pour la voir. Sirius, à {sirius}, est l’étoile la plus brillante de notre nuit.\n\nLa plus lointaine de ce petit groupe, parmi celles qu’on trouve facilement, est Altaïr, {altair}.",
+      en: "The Sun has quiet neighbours. Barnard’s Star is {barnard} away, and far too faint for the naked eye. Sirius, at {sirius}, is the brightest star of our night.\n\nFarthest out in this little crowd is Altair, {altair}.",
+      fr: "Le Soleil a des voisins discrets. L’étoile de Barnard est à {barnard}, et bien trop faible pour l’œil nu. Sirius, à {sirius}, est l’étoile la plus brillante de notre nuit.\n\nLa plus lointaine de ce petit groupe est Altaïr : {altair}.",
     },
     {
       titleEn: "How far is that bright star?",
@@ -73,12 +73,25 @@ export const NEAREST_SUNS: SeedExhibit = {
       ],
       figures: [
         { key: "vega", of: "Vega", form: "value" },
-        { key: "polaris", of: "Polaris", form: "value" },
+        { key: "capella", of: "Capella", form: "value" },
         { key: "rigel", of: "Rigel", form: "value-and-range" },
         { key: "arcturus-light", of: "Arcturus", form: "value", quantity: "light-travel" },
       ],
-      en: "Bright does not mean near. Vega is {vega} away, Polaris {polaris}, and yet they look much alike. Rigel is {rigel} away: its light is strong enough to cross all that.\n\nThe light of Arcturus has been on its way for {arcturus-light}.",
-      fr: "Brillante ne veut pas dire proche. Véga est à {vega}, l’étoile Polaire à {polaris}, et pourtant elles se ressemblent. Rigel est à {rigel} : sa lumière est assez forte pour franchir tout cela.\n\nLa lumière d’Arcturus voyage depuis {arcturus-light}.",
+      en: "Bright does not mean near. Vega and Capella look almost the same to us, yet Vega is {vega} away and Capella {capella}. Rigel comes close to both, and it is {rigel} away: its light is strong enough to cross all that.\n\nThe light of Arcturus has been on its way for {arcturus-light}.",
+      fr: "Brillante ne veut pas dire proche. Véga et Capella nous paraissent presque semblables, et pourtant Véga est à {vega} et Capella à {capella}. Rigel brille presque autant, et elle est à {rigel} : sa lumière est assez forte pour franchir tout cela.\n\nLa lumière d’Arcturus voyage depuis {arcturus-light}.",
+    },
+    {
+      titleEn: "The great lights, far behind",
+      titleFr: "Les grandes lumières, loin derrière",
+      document: { mapping: "log", camera: { azimuthDeg: -140, elevationDeg: 22, distance: 1.1, fovDeg: 40 } },
+      cast: ["Sirius", "Vega", "Canopus", "Spica", "Polaris", "Antares", "Betelgeuse", "Rigel", "Deneb"],
+      figures: [
+        { key: "canopus", of: "Canopus", form: "value" },
+        { key: "betelgeuse", of: "Betelgeuse", form: "range" },
+        { key: "deneb", of: "Deneb", form: "range" },
+      ],
+      en: "Some stars are bright because they are giants. Canopus shines second only to Sirius from {canopus} away. For Betelgeuse the measurement leaves room: it is {betelgeuse} away, and Deneb {deneb}.\n\nLook for the bars along the line of sight. They show how well each distance is known.",
+      fr: "Certaines étoiles brillent parce que ce sont des géantes. Canopus, seconde derrière Sirius, est à {canopus}. Pour Bételgeuse, la mesure laisse une marge : sa distance est comprise {betelgeuse}, et celle de Deneb {deneb}.\n\nCherchez les barres le long de la ligne de visée : elles montrent à quel point chaque distance est connue.",
     },
   ],
 };
@@ -99,7 +112,7 @@ export const FAMILIAR_PATTERN: SeedExhibit = {
         { key: "merak", of: "Merak", form: "value" },
       ],
       en: "From here they make one picture. Turn it and see how deep it is: Merak is {merak} away, while Alkaid, at one end, is {alkaid} away, and Dubhe, at the other, {dubhe}.",
-      fr: "D’ici, elles forment une seule image. Tournez-la pour voir sa profondeur : Mérak est à {merak}, Alkaid, à un bout, à {alkaid}, et Dubhe, à l’autre, à {dubhe}.",
+      fr: "D’ici, elles forment une seule image. Tournez-la pour voir sa profondeur : Merak est à {merak}, Alkaid, à un bout, à {alkaid}, et Dubhe, à l’autre, à {dubhe}.",
     },
   ],
 };

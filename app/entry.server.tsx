@@ -4,6 +4,8 @@ import { isbot } from "isbot";
 import { renderToPipeableStream } from "react-dom/server";
 import { type EntryContext, type RouterContextProvider, ServerRouter } from "react-router";
 import { nonceContext } from "./context.server.ts";
+// Seals are looked at again in every change (see DEVELOPERS.md, "The shelf").
+import "./review/register.server.ts";
 import { NonceContext } from "./ui/nonce-context.ts";
 
 export const streamTimeout = 5_000;

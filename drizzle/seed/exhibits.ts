@@ -34,7 +34,7 @@ export const NEAREST_SUNS: SeedExhibit = {
     {
       titleEn: "Around the corner",
       titleFr: "Au coin de la rue",
-      document: { mapping: "linear", camera: { azimuthDeg: -52, elevationDeg: 26, distance: 1.05, fovDeg: 40 } },
+      document: { mapping: "linear", camera: { azimuthDeg: -52, elevationDeg: 26, distance: 0.95, fovDeg: 40 } },
       cast: [
         "Barnard's Star",
         "Sirius",
@@ -52,13 +52,13 @@ export const NEAREST_SUNS: SeedExhibit = {
         { key: "sirius", of: "Sirius", form: "value" },
         { key: "altair", of: "Altair", form: "value-and-range" },
       ],
-      en: "The Sun has quiet neighbours. Barnard’s Star is {barnard} away, and far too faint for the naked eye. Sirius, at {sirius}, is the brightest star of our night.\n\nFarthest out in this little crowd is Altair, {altair}.",
-      fr: "Le Soleil a des voisins discrets. L’étoile de Barnard est à {barnard}, et bien trop faible pour l’œil nu. Sirius, à {sirius}, est l’étoile la plus brillante de notre nuit.\n\nLa plus lointaine de ce petit groupe est Altaïr : {altair}.",
+      en: "The Sun has quiet neighbours. Barnard’s Star is {barnard} away, and far too faint for the naked eye; Alpha Centauri, nearer still, is not in this picture. Sirius, at {sirius}, is the brightest star of our night.\n\nFarthest out in this little crowd is Altair, {altair}.",
+      fr: "Le Soleil a des voisins discrets. L’étoile de Barnard est à {barnard}, et bien trop faible pour l’œil nu ; Alpha du Centaure, plus proche encore, n’est pas dans cette image. Sirius, à {sirius}, est l’étoile la plus brillante de notre nuit.\n\nLa plus lointaine de ce petit groupe est Altaïr : {altair}.",
     },
     {
       titleEn: "How far is that bright star?",
       titleFr: "À quelle distance, cette étoile brillante ?",
-      document: { mapping: "log", camera: { azimuthDeg: 38, elevationDeg: 32, distance: 1.1, fovDeg: 40 } },
+      document: { mapping: "log", camera: { azimuthDeg: 38, elevationDeg: 32, distance: 0.9, fovDeg: 40 } },
       cast: [
         "Sirius",
         "Procyon",
@@ -83,15 +83,15 @@ export const NEAREST_SUNS: SeedExhibit = {
     {
       titleEn: "The great lights, far behind",
       titleFr: "Les grandes lumières, loin derrière",
-      document: { mapping: "log", camera: { azimuthDeg: -140, elevationDeg: 22, distance: 1.1, fovDeg: 40 } },
-      cast: ["Sirius", "Vega", "Canopus", "Spica", "Polaris", "Antares", "Betelgeuse", "Rigel", "Deneb"],
+      document: { mapping: "linear", camera: { azimuthDeg: -140, elevationDeg: 22, distance: 0.9, fovDeg: 40 } },
+      cast: ["Canopus", "Spica", "Polaris", "Antares", "Betelgeuse", "Rigel", "Deneb"],
       figures: [
         { key: "canopus", of: "Canopus", form: "value" },
         { key: "betelgeuse", of: "Betelgeuse", form: "range" },
         { key: "deneb", of: "Deneb", form: "range" },
       ],
-      en: "Some stars are bright because they are giants. Canopus shines second only to Sirius from {canopus} away. For Betelgeuse the measurement leaves room: it is {betelgeuse} away, and Deneb {deneb}.\n\nLook for the bars along the line of sight. They show how well each distance is known.",
-      fr: "Certaines étoiles brillent parce que ce sont des géantes. Canopus, seconde derrière Sirius, est à {canopus}. Pour Bételgeuse, la mesure laisse une marge : sa distance est comprise {betelgeuse}, et celle de Deneb {deneb}.\n\nCherchez les barres le long de la ligne de visée : elles montrent à quel point chaque distance est connue.",
+      en: "Some stars are bright because they are giants. Canopus shines second only to Sirius from {canopus} away. For Betelgeuse the measurement leaves room: it is {betelgeuse} away, and Deneb {deneb}.\n\nLook for the red bars along the line of sight. They show how well each distance is known.",
+      fr: "Certaines étoiles brillent parce que ce sont des géantes. Canopus, seconde derrière Sirius, est à {canopus}. Pour Bételgeuse, la mesure laisse une marge : sa distance est comprise {betelgeuse}, et celle de Deneb {deneb}.\n\nCherchez les barres rouges le long de la ligne de visée : elles montrent à quel point chaque distance est connue.",
     },
   ],
 };
@@ -104,7 +104,7 @@ export const FAMILIAR_PATTERN: SeedExhibit = {
     {
       titleEn: "Seven stars, one picture",
       titleFr: "Sept étoiles, une image",
-      document: { mapping: "linear", camera: { azimuthDeg: -120, elevationDeg: 8, distance: 0.9, fovDeg: 40 } },
+      document: { mapping: "linear", camera: { azimuthDeg: -120, elevationDeg: 8, distance: 0.85, fovDeg: 40 } },
       cast: ["Alkaid", "Mizar", "Alioth", "Megrez", "Phecda", "Merak", "Dubhe"],
       figures: [
         { key: "alkaid", of: "Alkaid", form: "value" },

@@ -40,7 +40,9 @@ test.each(["name", "distance"] as const)(
       expect(forwards).toHaveLength(rows.length);
       expect(new Set(forwards)).toEqual(new Set(rows.map((row) => row.id)));
       const last = rows.find((row) => row.id === forwards.at(-1));
-      const end = sort === "name" ? `${last?.name}~${last?.id}` : `${last?.distancePc ?? 1e30}~${last?.id}`;
+      const end =
+        sort === "name" ? `${last?.name}~${last?.id}` : `${last?.distancePc ?? (descending ? -1 : 1e30)}~${last?.id}`;
+      if (sort === "distance") expect(last?.distancePc).toBeNull();
       const backwards = await walk(editor, { ...query, before: end }, "previous");
       expect(backwards).toEqual(forwards.slice(0, -1).reverse());
     }

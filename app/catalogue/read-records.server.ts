@@ -18,9 +18,9 @@ export interface RecordQuery {
 }
 
 const PAGE = 50;
-/** Records without a distance stand behind all that have one. */
-const FAR = 1e30;
-const distanceKey = sql<number>`coalesce(${record.distancePc}, ${FAR})`;
+/** What a record without a distance is sorted by: it stands last, whichever way the table runs. */
+const farOf = ({ descending }: RecordQuery) => (descending ? -1 : 1e30);
+const distanceKeyOf = (query: RecordQuery) => sql<number>`coalesce(${record.distancePc}, ${farOf(query)})`;
 
 /** One page of the table, keyset both ways: the hundredth page costs what the first does. */
 export async function readRecords(actor: Actor | null, query: RecordQuery) {
@@ -62,7 +62,7 @@ type Row = typeof record.$inferSelect;
 
 function keyOf(query: RecordQuery, row: Row | undefined): string | null {
   if (!row) return null;
-  return query.sort === "name" ? `${row.name}~${row.id}` : `${row.distancePc ?? FAR}~${row.id}`;
+  return query.sort === "name" ? `${row.name}~${row.id}` : `${row.distancePc ?? farOf(query)}~${row.id}`;
 }
 
 function searchFor(search: string): SQL | undefined {
@@ -90,7 +90,8 @@ function searchFor(search: string): SQL | undefined {
   );
 }
 
-function beyond({ sort, descending, after, before }: RecordQuery, backwards: boolean): SQL | undefined {
+function beyond(query: RecordQuery, backwards: boolean): SQL | undefined {
+  const { sort, descending, after, before } = query;
   const key = backwards ? before : after;
   const cut = key?.lastIndexOf("~") ?? -1;
   if (!key || cut < 0) return undefined;
@@ -101,12 +102,14 @@ function beyond({ sort, descending, after, before }: RecordQuery, backwards: boo
   }
   const distance = Number(value);
   if (!Number.isFinite(distance)) return undefined;
+  const distanceKey = distanceKeyOf(query);
   return or(further(distanceKey, distance), and(eq(distanceKey, distance), further(record.id, id)));
 }
 
-function order({ sort, descending }: RecordQuery, backwards: boolean): SQL[] {
+function order(query: RecordQuery, backwards: boolean): SQL[] {
+  const { sort, descending } = query;
   const direction = descending === backwards ? asc : desc;
-  return [direction(sort === "name" ? record.name : distanceKey), direction(record.id)];
+  return [direction(sort === "name" ? record.name : distanceKeyOf(query)), direction(record.id)];
 }
 
 async function readIdentifiers(ids: string[]): Promise<Map<string, string[]>> {

@@ -25,7 +25,12 @@ export function TheirsAndYours({ labels, theirs, yours, say = (_, value) => valu
   const shown = (field: string, value: string) =>
     value === "" ? <span className="text-ink-soft">nothing</span> : say(field, value);
   return (
-    <Notice tone="warning" title="Somebody else saved this while you were typing">
+    <Notice
+      tone="warning"
+      title="Somebody else saved this while you were typing"
+      // The table lies on the notice's own ground.
+      className="[&_thead]:static [&_thead]:bg-transparent"
+    >
       <p className="mb-3">
         What you typed is still in the form below. Take over from theirs what should stay, then save again: the form is
         kept as it then stands.

@@ -35,7 +35,7 @@ export function JudgeForm({ what, measurement, mayConfirm, mayReject, actionData
         <input type="hidden" name="version" value={measurement.version} />
         <Field
           id={`why-${measurement.id}`}
-          label="What you found"
+          label={mayConfirm ? "What you found" : "Why"}
           name="reason"
           required
           defaultValue={form.value("reason")}

@@ -60,11 +60,11 @@ function valueText({ value, error, unit }: Measured): string {
 
 function Printed({ row }: { row: Measured }) {
   return (
-    <>
+    <div>
       {valueText(row)}
       <div className="text-sm font-normal text-ink-soft">as printed “{row.rawText}”</div>
       {row.quantity === "parallax" ? <RegimeLine row={row} /> : null}
-    </>
+    </div>
   );
 }
 
@@ -126,7 +126,7 @@ function parallaxColumns({ adoptedId, actionData }: LedgerProps, domain: Domain 
       id: "spread",
       head: "Spread",
       headHidden: true,
-      className: "w-[24%]",
+      className: "md:w-[24%]",
       cell: (row) =>
         drawable(row) ? (
           <SpreadBar {...spreadOf(row)} domain={domain} muted={row.id !== adoptedId} label={valueText(row)} />

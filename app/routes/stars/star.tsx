@@ -174,7 +174,9 @@ function VettedMark({ record }: Pick<Data, "record">) {
   }
   return (
     <StateMark tone="vetted" large>
-      vetted <Time at={record.vettedAt} /> by {record.vetterName}
+      <span>
+        vetted <Time at={record.vettedAt} /> by {record.vetterName}
+      </span>
     </StateMark>
   );
 }

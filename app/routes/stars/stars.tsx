@@ -140,7 +140,7 @@ function columns(domain: Domain | undefined): Column<Row>[] {
       id: "spread",
       head: "Range",
       headHidden: true,
-      className: "w-[28%]",
+      className: "md:w-[28%]",
       cell: (row) =>
         row.distancePc ? (
           <SpreadBar

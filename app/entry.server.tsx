@@ -2,8 +2,9 @@ import { PassThrough } from "node:stream";
 import { createReadableStreamFromReadable } from "@react-router/node";
 import { isbot } from "isbot";
 import { renderToPipeableStream } from "react-dom/server";
-import { type EntryContext, type RouterContextProvider, ServerRouter } from "react-router";
-import { nonceContext } from "./context.server.ts";
+import { type EntryContext, type HandleErrorFunction, type RouterContextProvider, ServerRouter } from "react-router";
+import { nonceContext, requestIdContext } from "./context.server.ts";
+import { logBroken } from "./http.server.ts";
 // Seals are looked at again in every change (see DEVELOPERS.md, "The shelf").
 import "./review/register.server.ts";
 import { NonceContext } from "./ui/nonce-context.ts";
@@ -44,7 +45,7 @@ export default function handleRequest(
         onError(error) {
           failed = true;
           // Errors before the shell reject the promise and are reported there.
-          if (answered) console.error(error);
+          if (answered) logBroken(context.get(requestIdContext), error);
         },
       },
     );
@@ -52,3 +53,8 @@ export default function handleRequest(
     setTimeout(abort, streamTimeout + 1000).unref();
   });
 }
+
+/** What broke outside the wrappers of http.server.ts. Somebody who went away in the middle is no error. */
+export const handleError: HandleErrorFunction = (error, { request, context }) => {
+  if (!request.signal.aborted) logBroken((context as RouterContextProvider).get(requestIdContext), error);
+};

@@ -124,6 +124,9 @@ export function answerFor(error: AppError): Answer {
 export function answerForStatus(status: number): Answer {
   const known = Object.values(ANSWERS).find((answer) => answer.status === status);
   if (known) return known;
+  if (status === 405) {
+    return { status, title: "This address does not do that", next: "Go back and use the page's own buttons." };
+  }
   if (status < 500) return { status, title: "The request could not be answered", next: "Go back and try another way." };
   return {
     status,

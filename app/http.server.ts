@@ -1,8 +1,17 @@
 import { randomBytes } from "node:crypto";
-import { data, type MiddlewareFunction } from "react-router";
-import { nonceContext, requestIdContext } from "./context.server.ts";
+import { data, type MiddlewareFunction, type RouterContextProvider } from "react-router";
+import { nonceContext, requestIdContext, retryAfterContext } from "./context.server.ts";
 import { env } from "./env.server.ts";
-import { AppError, answerFor, type ErrorKind, type ErrorLink, type FieldErrors, Invalid, TooMany } from "./errors.ts";
+import {
+  AppError,
+  answerFor,
+  answerForStatus,
+  type ErrorKind,
+  type ErrorLink,
+  type FieldErrors,
+  Invalid,
+  TooMany,
+} from "./errors.ts";
 
 /** What a refused form gets back: messages by field, and what was typed, so that nothing is lost. */
 export interface FormProblem {
@@ -17,10 +26,18 @@ export interface FormProblem {
 
 /** What an error page is given instead of the error itself. */
 export interface PageProblem {
-  kind: ErrorKind;
+  kind: ErrorKind | "broken";
   title: string;
-  detail: string;
+  detail: string | null;
   next: string;
+  /** By which the log knows what broke. */
+  requestId?: string;
+}
+
+/** What every loader and action is given; in unit tests a request may come without a context. */
+interface Asked {
+  request?: Request;
+  context?: Readonly<RouterContextProvider>;
 }
 
 const SAFE_METHODS = new Set(["GET", "HEAD", "OPTIONS"]);
@@ -42,12 +59,15 @@ export async function readForm(request: Request): Promise<FormData> {
   return form;
 }
 
-const SECRET_FIELD = /password|token/i;
+/** Never sent back: passwords under any of their names ("current", "again" stand in the same forms), tokens. */
+const SECRET_FIELD = /password|token|^(?:current|again)$/i;
 
 function typedValues(request: Request): Record<string, string> {
   const values: Record<string, string> = {};
   for (const [name, value] of forms.get(request) ?? []) {
-    if (typeof value === "string" && !SECRET_FIELD.test(name)) values[name] = value;
+    if (typeof value !== "string" || SECRET_FIELD.test(name)) continue;
+    // Boxes of one name come several times: one a line (form-state.ts reads them so).
+    values[name] = Object.hasOwn(values, name) ? `${values[name]}\n${value}` : value;
   }
   return values;
 }
@@ -61,14 +81,38 @@ function retryHeaders(error: AppError): Record<string, string> {
   return error instanceof TooMany ? { "Retry-After": String(Math.ceil(error.retryAfterSeconds)) } : {};
 }
 
+/** A page's status reaches its answer, its headers do not: the root middleware sets this one from the context. */
+function comeBackLater(error: AppError, { context }: Asked): void {
+  if (error instanceof TooMany) context?.set(retryAfterContext, Math.ceil(error.retryAfterSeconds));
+}
+
+/**
+ * What nobody foresaw: the log gets the error with the request's id, the page gets the id alone. Redirects and answers
+ * that a loader throws on purpose are no errors and pass; a developer sees the error itself.
+ */
+function broken(error: unknown, { context }: Asked): unknown {
+  if (!(error instanceof Error) || process.env.NODE_ENV === "development") return error;
+  const requestId = context?.get(requestIdContext) ?? "";
+  logBroken(requestId, error);
+  const { status, title, next } = answerForStatus(500);
+  const body: PageProblem = { kind: "broken", title, detail: null, next, requestId };
+  return data(body, { status });
+}
+
+/** One line to find it by, then the error with its stack. */
+export function logBroken(requestId: string, error: unknown): void {
+  console.error(`request ${requestId || "without an id"}:`, error);
+}
+
 /** Wraps a page's loader: what a verb throws becomes the status and the words of the table in errors.ts. */
-export function answered<A, R>(read: (args: A) => Promise<R> | R): (args: A) => Promise<R> {
+export function answered<A extends Asked, R>(read: (args: A) => Promise<R> | R): (args: A) => Promise<R> {
   return async (args) => {
     try {
       return await read(args);
     } catch (error) {
-      if (!(error instanceof AppError)) throw error;
-      throw data(pageProblem(error), { status: answerFor(error).status, headers: retryHeaders(error) });
+      if (!(error instanceof AppError)) throw broken(error, args);
+      comeBackLater(error, args);
+      throw data(pageProblem(error), { status: answerFor(error).status });
     }
   };
 }
@@ -76,12 +120,13 @@ export function answered<A, R>(read: (args: A) => Promise<R> | R): (args: A) => 
 const BACK_TO_THE_FORM = new Set<ErrorKind>(["invalid", "conflict", "locked", "too-large", "too-many", "unavailable"]);
 
 /** Wraps a page's action: what a person can mend goes back to their form, the rest to the error page. */
-export function answeredAction<A extends { request: Request }, R>(act: (args: A) => Promise<R>) {
+export function answeredAction<A extends Asked & { request: Request }, R>(act: (args: A) => Promise<R>) {
   return async (args: A) => {
     try {
       return await act(args);
     } catch (error) {
-      if (!(error instanceof AppError)) throw error;
+      if (!(error instanceof AppError)) throw broken(error, args);
+      comeBackLater(error, args);
       const { status } = answerFor(error);
       if (!BACK_TO_THE_FORM.has(error.kind)) throw data(pageProblem(error), { status });
       const errors = error instanceof Invalid ? error.fields : { "": [error.message] };
@@ -89,7 +134,7 @@ export function answeredAction<A extends { request: Request }, R>(act: (args: A)
       const problem: FormProblem = {
         problem: { kind: error.kind, message: error.message, errors, values: typedValues(args.request), ...links },
       };
-      return data(problem, { status, headers: retryHeaders(error) });
+      return data(problem, { status });
     }
   };
 }
@@ -117,16 +162,26 @@ export function problemFor(error: AppError): Response {
   return problem(status, title, error.message, errors, retryHeaders(error));
 }
 
-/** Wraps a resource route: what a verb throws becomes application/problem+json. */
-export function answeredApi<A>(answer: (args: A) => Promise<Response> | Response): (args: A) => Promise<Response> {
+/** Wraps a resource route: what a verb throws, or what breaks, becomes application/problem+json. */
+export function answeredApi<A extends Asked>(
+  answer: (args: A) => Promise<Response> | Response,
+): (args: A) => Promise<Response> {
   return async (args) => {
     try {
       return await answer(args);
     } catch (error) {
-      if (!(error instanceof AppError)) throw error;
-      return problemFor(error);
+      if (error instanceof AppError) return problemFor(error);
+      if (!(error instanceof Error)) throw error;
+      const requestId = args.context?.get(requestIdContext) ?? "";
+      logBroken(requestId, error);
+      return problem(500, answerForStatus(500).title, `Nothing was changed. The log knows it as ${requestId}.`);
     }
   };
+}
+
+/** For an address that does not answer a method. `allow` names those it does, as RFC 9110 section 15.5.6 asks. */
+export function methodNotAllowed(allow: string): Response {
+  return problem(405, answerForStatus(405).title, `This address answers ${allow} only.`, [], { Allow: allow });
 }
 
 const LOOPBACK = new Set(["localhost", "127.0.0.1", "[::1]"]);
@@ -175,13 +230,25 @@ function contentSecurityPolicy(nonce: string): string {
   ].join("; ");
 }
 
+const ONLY_LOOKED_AT = "GET, HEAD";
+
+/** A route without an action is refused by the router: a page as a page, anything else as a problem, both with Allow. */
+function methodSaid(response: Response): Response {
+  if (response.status !== 405 || response.headers.has("Allow")) return response;
+  if (!response.headers.get("Content-Type")?.startsWith("text/html")) return methodNotAllowed(ONLY_LOOKED_AT);
+  response.headers.set("Allow", ONLY_LOOKED_AT);
+  return response;
+}
+
 /** Nonce, request id and the usual headers, for pages and resource routes alike. */
 export const hardenResponses: MiddlewareFunction<Response> = async ({ request, context }, next) => {
   const nonce = randomBytes(18).toString("base64");
   context.set(nonceContext, nonce);
   context.set(requestIdContext, randomBytes(9).toString("base64url"));
-  const response = await next();
+  const response = methodSaid(await next());
   const { headers } = response;
+  const retryAfter = context.get(retryAfterContext);
+  if (retryAfter !== null) headers.set("Retry-After", String(retryAfter));
   headers.set("Content-Security-Policy", contentSecurityPolicy(nonce));
   headers.set("X-Content-Type-Options", "nosniff");
   headers.set("X-Frame-Options", "DENY");

@@ -2,6 +2,7 @@ import { type ReactNode, useContext } from "react";
 import { Links, Meta, Outlet, Scripts, ScrollRestoration, useMatches, useRouteLoaderData } from "react-router";
 import type { Route } from "./+types/root";
 import "./app.css";
+import { requestIdContext } from "./context.server.ts";
 import { hardenResponses, refuseForeignOrigins } from "./http.server.ts";
 import { findSession } from "./people/find-session.server.ts";
 import { errorTitle, RouteError } from "./routes/RouteError.tsx";
@@ -16,8 +17,8 @@ export const links: Route.LinksFunction = () => [{ rel: "icon", href: "/favicon.
 
 export const meta: Route.MetaFunction = ({ error }) => [{ title: error ? errorTitle(error) : "Alidade" }];
 
-export function loader({ request }: Route.LoaderArgs) {
-  return { theme: themeFromCookie(request.headers.get("Cookie")) };
+export function loader({ request, context }: Route.LoaderArgs) {
+  return { theme: themeFromCookie(request.headers.get("Cookie")), requestId: context.get(requestIdContext) };
 }
 
 export function Layout({ children }: { children: ReactNode }) {

@@ -24,6 +24,17 @@ test("a mail promised in a change is sent by the worker, once", async () => {
   expect(caught.filter((mail) => mail.subject === "Promised")).toHaveLength(1);
 });
 
+test("of a mail that was sent its text, which may hold a one-time link, is not kept", async () => {
+  await change(actor, "test.secret", async (c) => {
+    c.audit(note);
+    c.mail({ ...message("Secret"), text: "http://127.0.0.1/invitation/the-token" });
+  });
+  await drainOutbox({ mail: sendMail });
+  const rows = await db().select().from(outbox);
+  expect(JSON.stringify(rows)).not.toContain("the-token");
+  expect(rows.map((row) => row.payload)).toContainEqual({ to: "ines@tern.example", subject: "Secret" });
+});
+
 test("a change that fails promises nothing and writes no audit row", async () => {
   await expect(
     change(actor, "test.fails", async (c) => {

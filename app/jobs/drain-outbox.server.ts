@@ -57,7 +57,14 @@ async function doOne(handlers: OutboxHandlers): Promise<"done" | "failed" | "not
         .where(eq(outbox.id, row.id));
       return "failed";
     }
-    await tx.update(outbox).set({ attempts, doneAt: new Date(), lastError: null }).where(eq(outbox.id, row.id));
+    const done = { attempts, doneAt: new Date(), lastError: null, payload: withoutText(row.payload) };
+    await tx.update(outbox).set(done).where(eq(outbox.id, row.id));
     return "done";
   });
+}
+
+/** A mail that is sent may have held a one-time link: to whom it went and about what is kept, its text is not. */
+function withoutText(payload: unknown): unknown {
+  if (typeof payload !== "object" || payload === null) return payload;
+  return Object.fromEntries(Object.entries(payload).filter(([name]) => name !== "text"));
 }

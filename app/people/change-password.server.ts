@@ -9,6 +9,7 @@ import { refuseOwnName } from "./choose-password.server.ts";
 import { endSessions } from "./end-sessions.server.ts";
 import type { ChangePassword } from "./input.ts";
 import { countAttempt } from "./limits.server.ts";
+import { endLinks } from "./one-time-link.server.ts";
 import { openPerson } from "./open-person.server.ts";
 import { hashPassword, passwordMatches } from "./password.server.ts";
 
@@ -27,6 +28,7 @@ export async function changePassword(actor: Actor | null, input: z.output<typeof
       .update(person)
       .set({ passwordHash, version: sql`${person.version} + 1` })
       .where(eq(person.id, found.id));
+    await endLinks(c, found.id);
     await endSessions(c, found.id, actor.sessionId ?? "");
     c.audit({ objectType: "person", objectId: found.id, objectName: found.name, note: "Changed the password" });
   });

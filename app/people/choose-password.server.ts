@@ -7,7 +7,7 @@ import { person } from "#app/database/schema/people.ts";
 import { Invalid } from "#app/errors.ts";
 import { endSessions } from "./end-sessions.server.ts";
 import type { ChoosePassword } from "./input.ts";
-import { readLink, spendLink } from "./one-time-link.server.ts";
+import { endLinks, readLink, spendLink } from "./one-time-link.server.ts";
 import { openPerson } from "./open-person.server.ts";
 import { hashPassword } from "./password.server.ts";
 
@@ -19,11 +19,11 @@ export function refuseOwnName(password: string, of: { name: string; email: strin
 }
 
 /** What both links do: use the link up, set the password, end every session. */
-async function choose(purpose: LinkPurpose, verb: string, input: z.output<typeof ChoosePassword>): Promise<void> {
+async function choose(purpose: LinkPurpose, verb: string, input: Input, requestId: string): Promise<void> {
   const whose = await readLink(input.token, purpose);
   refuseOwnName(input.password, whose);
   const passwordHash = await hashPassword(input.password);
-  await change(NOBODY, verb, async (c) => {
+  await change(byLink(requestId), verb, async (c) => {
     const personId = await spendLink(c, input.token, purpose);
     const found = await openPerson(c, personId);
     await c.tx
@@ -34,6 +34,7 @@ async function choose(purpose: LinkPurpose, verb: string, input: z.output<typeof
         version: sql`${person.version} + 1`,
       })
       .where(eq(person.id, personId));
+    await endLinks(c, personId);
     await endSessions(c, personId);
     note(c, found, purpose);
   });
@@ -51,21 +52,23 @@ function note(c: Change, whose: { id: string; name: string; state: string }, pur
 }
 
 /** Nobody is signed in when a link is followed; the audit row names the link's owner as its object. */
-const NOBODY: Actor = {
+const byLink = (requestId: string): Actor => ({
   personId: "",
   name: "By the link in the mail",
   email: "",
   roles: [],
   sessionId: null,
-  requestId: "",
-};
+  requestId,
+});
+
+type Input = z.output<typeof ChoosePassword>;
 
 /** Public, by the link in the mail. @throws NotFound when the link is spent, Invalid */
-export async function acceptInvitation(input: z.output<typeof ChoosePassword>): Promise<void> {
-  await choose("invitation", "people.accept-invitation", input);
+export async function acceptInvitation(input: Input, requestId: string): Promise<void> {
+  await choose("invitation", "people.accept-invitation", input, requestId);
 }
 
 /** Public, by the link in the mail. @throws NotFound when the link is spent, Invalid */
-export async function resetPassword(input: z.output<typeof ChoosePassword>): Promise<void> {
-  await choose("password-reset", "people.reset-password", input);
+export async function resetPassword(input: Input, requestId: string): Promise<void> {
+  await choose("password-reset", "people.reset-password", input, requestId);
 }

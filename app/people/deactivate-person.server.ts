@@ -7,6 +7,7 @@ import { authorise } from "./authorise.ts";
 import { endSessions } from "./end-sessions.server.ts";
 import type { PersonAndVersion } from "./input.ts";
 import { keepAnAdmin } from "./keep-an-admin.server.ts";
+import { endLinks } from "./one-time-link.server.ts";
 import { openPerson } from "./open-person.server.ts";
 
 type Input = z.output<typeof PersonAndVersion>;
@@ -20,6 +21,7 @@ export async function deactivatePerson(actor: Actor | null, input: Input): Promi
     if (found.state === "active" && found.roles.includes("admin")) await keepAnAdmin(c, found.id);
     await compareAndSet(c.tx, person, found.id, input.version, { state: "deactivated" });
     await endSessions(c, found.id);
+    await endLinks(c, found.id);
     const states = { before: { state: found.state }, after: { state: "deactivated" } };
     c.audit({ objectType: "person", objectId: found.id, objectName: found.name, ...states });
   });

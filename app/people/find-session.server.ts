@@ -31,7 +31,7 @@ export async function actorOfToken(token: string, requestId: string): Promise<Ac
     await db()
       .update(session)
       .set({ lastSeenAt: new Date(now) })
-      .where(eq(session.id, first.session.id));
+      .where(and(eq(session.id, first.session.id), isNull(session.revokedAt)));
   }
   return {
     personId: first.person.id,

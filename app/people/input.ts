@@ -29,6 +29,7 @@ const roles = z.preprocess(
 const name = z.string().trim().min(1, "Enter a name.").max(120, "At most 120 characters.");
 
 export const InvitePerson = z.object({ email, name, roles });
+export const FirstAdmin = z.object({ email, name });
 export const ChangeRoles = z.object({ personId: z.string(), version: z.coerce.number().int(), roles });
 export const PersonAndVersion = z.object({ personId: z.string(), version: z.coerce.number().int() });
 export const RequestReset = z.object({ email });

@@ -10,6 +10,8 @@ import type { InvitePerson, PersonAndVersion } from "./input.ts";
 import { makeLink } from "./one-time-link.server.ts";
 import { openPerson } from "./open-person.server.ts";
 
+type Invited = z.output<typeof InvitePerson>;
+
 async function mailInvitation(c: Change, to: { id: string; name: string; email: string }): Promise<void> {
   const { url, lasts } = await makeLink(c, to.id, "invitation");
   c.mail({
@@ -25,12 +27,22 @@ async function mailInvitation(c: Change, to: { id: string; name: string; email: 
 }
 
 /** @throws Invalid at `email` when somebody has this address already */
-export async function invitePerson(actor: Actor | null, input: z.output<typeof InvitePerson>): Promise<string> {
+export async function invitePerson(actor: Actor | null, input: Invited): Promise<string> {
   authorise(actor, "people.manage");
+  return openInvited(actor, "people.invite", input);
+}
+
+/** The work of it, for those who have asked who may. `allowed` is looked at inside the transaction. */
+export async function openInvited(
+  actor: Actor,
+  verb: string,
+  { email, name, roles }: Invited,
+  allowed: (c: Change) => Promise<void> = async () => {},
+): Promise<string> {
   const personId = newId();
-  const { email, name, roles } = input;
   try {
-    await change(actor, "people.invite", async (c) => {
+    await change(actor, verb, async (c) => {
+      await allowed(c);
       await c.tx.insert(person).values({ id: personId, email, name, state: "invited" });
       await c.tx.insert(personRole).values(roles.map((role) => ({ personId, role })));
       await mailInvitation(c, { id: personId, name, email });

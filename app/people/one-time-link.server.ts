@@ -1,7 +1,7 @@
 import { and, eq, gt, isNull } from "drizzle-orm";
 import type { Change } from "#app/audit/change.server.ts";
 import { db } from "#app/database/db.server.ts";
-import type { LinkPurpose } from "#app/database/enums.ts";
+import type { LinkPurpose, PersonState } from "#app/database/enums.ts";
 import { newId } from "#app/database/new-id.ts";
 import { oneTimeLink, person } from "#app/database/schema/people.ts";
 import { env } from "#app/env.server.ts";
@@ -14,15 +14,23 @@ const LIFETIME: Record<LinkPurpose, { ms: number; words: string; path: string }>
   "password-reset": { ms: HOUR, words: "one hour", path: "reset-password" },
 };
 
-const SPENT = "This link was used already, has expired, or was replaced by a newer one. Ask for another.";
+const SPENT = "This link was used already, has expired, or was replaced by a newer one.";
 
-/** A new link for a person; older ones of the same purpose end. Only its hash is kept. */
-export async function makeLink(c: Change, personId: string, purpose: LinkPurpose) {
-  const now = new Date();
+/** The account for which a link of either purpose still says something. */
+const WAITING: Record<LinkPurpose, PersonState> = { invitation: "invited", "password-reset": "active" };
+
+/** Ends what links a person still has: a newer one is on its way, or the account or its password changed. */
+export async function endLinks(c: Pick<Change, "tx">, personId: string): Promise<void> {
   await c.tx
     .update(oneTimeLink)
-    .set({ usedAt: now })
-    .where(and(eq(oneTimeLink.personId, personId), eq(oneTimeLink.purpose, purpose), isNull(oneTimeLink.usedAt)));
+    .set({ usedAt: new Date() })
+    .where(and(eq(oneTimeLink.personId, personId), isNull(oneTimeLink.usedAt)));
+}
+
+/** A new link for a person; older ones end. Only its hash is kept. */
+export async function makeLink(c: Change, personId: string, purpose: LinkPurpose) {
+  const now = new Date();
+  await endLinks(c, personId);
   const token = newToken();
   const { ms, words, path } = LIFETIME[purpose];
   const expiresAt = new Date(now.getTime() + ms);
@@ -36,6 +44,7 @@ function usable(token: string, purpose: LinkPurpose) {
     eq(oneTimeLink.purpose, purpose),
     isNull(oneTimeLink.usedAt),
     gt(oneTimeLink.expiresAt, new Date()),
+    eq(person.state, WAITING[purpose]),
   );
 }
 
@@ -52,7 +61,11 @@ export async function readLink(token: string, purpose: LinkPurpose) {
 
 /** Uses a link up; of two clicks at once, one. @throws NotFound */
 export async function spendLink(c: Pick<Change, "tx">, token: string, purpose: LinkPurpose): Promise<string> {
-  const [found] = await c.tx.select().from(oneTimeLink).where(usable(token, purpose));
+  const [found] = await c.tx
+    .select({ id: oneTimeLink.id, personId: oneTimeLink.personId })
+    .from(oneTimeLink)
+    .innerJoin(person, eq(person.id, oneTimeLink.personId))
+    .where(usable(token, purpose));
   if (!found) throw new NotFound(SPENT);
   const [spent] = await c.tx
     .update(oneTimeLink)

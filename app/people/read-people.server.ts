@@ -24,6 +24,7 @@ export async function readPeople(actor: Actor | null) {
 
 /** @throws NotFound */
 export async function readPerson(actor: Actor | null, personId: string) {
+  authorise(actor, "people.manage");
   const found = (await readPeople(actor)).find((one) => one.id === personId);
   if (!found) throw new NotFound("There is no such person.");
   return found;

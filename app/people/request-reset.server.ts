@@ -1,3 +1,4 @@
+import { setTimeout as pause } from "node:timers/promises";
 import { and, eq } from "drizzle-orm";
 import type { z } from "zod";
 import type { Actor } from "#app/audit/actor.ts";
@@ -7,17 +8,25 @@ import { person } from "#app/database/schema/people.ts";
 import type { RequestReset } from "./input.ts";
 import { countAttempt } from "./limits.server.ts";
 import { makeLink } from "./one-time-link.server.ts";
+import { neighbourhood, type Visitor } from "./visitor.server.ts";
+
+/** Longer than writing the mail down takes, so that the time of the answer does not tell who has an account. */
+export const ANSWER_AFTER_MS = 250;
 
 /** Public. Mails a link if there is such an active account; the answer is the same if there is none. @throws TooMany */
-export async function requestReset(input: z.output<typeof RequestReset>, address: string): Promise<void> {
-  await countAttempt("reset-address", address);
+export async function requestReset(input: z.output<typeof RequestReset>, visitor: Visitor): Promise<void> {
+  await countAttempt("reset-address", neighbourhood(visitor.address));
   await countAttempt("reset-account", input.email);
+  await Promise.all([mailLink(input.email, visitor.requestId), pause(ANSWER_AFTER_MS)]);
+}
+
+async function mailLink(email: string, requestId: string): Promise<void> {
   const [found] = await db()
     .select()
     .from(person)
-    .where(and(eq(person.email, input.email), eq(person.state, "active")));
+    .where(and(eq(person.email, email), eq(person.state, "active")));
   if (!found) return;
-  const asker: Actor = { personId: "", name: "Somebody", email: "", roles: [], sessionId: null, requestId: "" };
+  const asker: Actor = { personId: "", name: "Somebody", email: "", roles: [], sessionId: null, requestId };
   await change(asker, "people.request-reset", async (c) => {
     const { url, lasts } = await makeLink(c, found.id, "password-reset");
     c.mail({

@@ -20,6 +20,16 @@ const PUBLIC = new Set([
   "app/people/sign-in.server.ts",
   "app/people/choose-password.server.ts",
   "app/people/request-reset.server.ts",
+  "app/people/invite-first-admin.server.ts",
+]);
+
+/** Take an actor and do not ask, because they are no verbs: how changes are written down, and predicates. */
+const NO_VERBS = new Map([
+  ["change", "writes down what a verb does"],
+  ["openInvited", "the work of two verbs, which have asked"],
+  ["mayReject", "answers yes or no"],
+  ["mayConfirm", "answers yes or no"],
+  ["actOnScene", "hands a form to the verb of its intent"],
 ]);
 
 const below = (folder: string, ending: RegExp) =>
@@ -62,6 +72,19 @@ async function answer(verb: Verb, actor: Actor | null): Promise<unknown> {
 test("the sources hold the verbs that people use", () => {
   expect(verbs.length).toBeGreaterThan(55);
   for (const { permission } of verbs) expect(Object.keys(PERMISSIONS)).toContain(permission);
+});
+
+test("whatever takes an actor asks who may, and is walked below", () => {
+  const walked = new Set(verbs.map((verb) => `${verb.file} ${verb.name}`));
+  const taking = /^export (?:async function|function|const) (\w+)(?:<[^(]*>)?[^(\n]*\(\s*_?\w+: (?:Pick<)?Actor\b/gm;
+  const found = files.flatMap((file) =>
+    [...sourceOf(file).matchAll(taking)].map((match) => ({ file, name: match[1] ?? "" })),
+  );
+  expect(found.length).toBeGreaterThan(55);
+  const unasked = found.filter(({ file, name }) => !walked.has(`${file} ${name}`) && !NO_VERBS.has(name));
+  expect(unasked).toEqual([]);
+  // No name stands in the list that is not there any more.
+  expect([...NO_VERBS.keys()].filter((name) => !found.some((one) => one.name === name))).toEqual([]);
 });
 
 test("whatever changes something asks who may, first thing, or is public by name", () => {

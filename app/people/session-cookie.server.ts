@@ -2,17 +2,16 @@ import { createCookie } from "react-router";
 import { env } from "#app/env.server.ts";
 
 /** On https the cookie is bound to this host and cannot be set from a neighbour (`__Host-`). */
-export function sessionCookieName(publicUrl: string): string {
+function sessionCookieName(publicUrl: string): string {
   return publicUrl.startsWith("https:") ? "__Host-alidade" : "alidade";
 }
 
-function sessionCookie() {
-  const { PUBLIC_URL } = env();
-  return createCookie(sessionCookieName(PUBLIC_URL), {
+export function sessionCookie(publicUrl = env().PUBLIC_URL) {
+  return createCookie(sessionCookieName(publicUrl), {
     httpOnly: true,
     sameSite: "lax",
     path: "/",
-    secure: PUBLIC_URL.startsWith("https:"),
+    secure: publicUrl.startsWith("https:"),
   });
 }
 

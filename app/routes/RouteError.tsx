@@ -1,4 +1,4 @@
-import { isRouteErrorResponse, useLocation } from "react-router";
+import { isRouteErrorResponse, useLocation, useRouteLoaderData } from "react-router";
 import { answerForStatus } from "#app/errors.ts";
 import { ErrorPage } from "#app/ui/ErrorPage.tsx";
 import { LinkButton } from "#app/ui/LinkButton.tsx";
@@ -8,12 +8,15 @@ export function RouteError({ error }: { error: unknown }) {
   const location = useLocation();
   const here = location.pathname + location.search;
   const { status, title, next } = answerTo(error);
+  // The root's own id is that of the request which brought this page: right for what broke while it was written.
+  const root = useRouteLoaderData<{ requestId?: string }>("root");
   return (
     <ErrorPage
       status={status === null ? undefined : String(status)}
       title={title}
       detail={detailOf(error)}
       next={next}
+      reference={status !== null && status >= 500 ? (requestIdOf(error) ?? root?.requestId) : undefined}
       stack={import.meta.env.DEV && error instanceof Error ? error.stack : undefined}
       actions={
         <>
@@ -63,4 +66,10 @@ function detailOf(error: unknown): string | undefined {
   }
   // The router's own refusals arrive as "Error: No route matches…".
   return typeof body === "string" && body !== "" && !body.startsWith("Error:") ? body : undefined;
+}
+
+function requestIdOf(error: unknown): string | undefined {
+  const body: unknown = isRouteErrorResponse(error) ? error.data : null;
+  const known = typeof body === "object" && body !== null && "requestId" in body;
+  return known && typeof body.requestId === "string" ? body.requestId : undefined;
 }

@@ -18,6 +18,9 @@ export function formState(
     links: problem?.links,
     error: (name: string) => problem?.errors[name],
     value: (name: string) => problem?.values[name] ?? saved[name]?.toString() ?? "",
+    /** For boxes of one name: which were ticked, after a refusal, otherwise which are kept. */
+    chosen: <T extends string>(name: string, kept: readonly T[]): readonly T[] =>
+      problem ? ((problem.values[name]?.split("\n") ?? []) as T[]) : kept,
     /** For boxes: an unticked box is not sent, so after a refusal its absence counts. */
     ticked: (name: string, kept: boolean) => (problem ? problem.values[name] !== undefined : kept),
   };

@@ -28,5 +28,7 @@ export function pathHere(text: unknown): string {
   if (typeof text !== "string" || !text.startsWith("/")) return "/";
   const base = "http://here.invalid";
   const url = URL.canParse(text, base) ? new URL(text, base) : null;
-  return url && url.origin === base ? `${url.pathname}${url.search}` : "/";
+  // "/.//elsewhere" is here while it is read, and "//elsewhere", which is not, once it is written down.
+  const isHere = url?.origin === base && !url.pathname.startsWith("//");
+  return isHere ? `${url.pathname}${url.search}` : "/";
 }

@@ -14,8 +14,8 @@ import { Gate } from "./Gate.tsx";
 
 export const meta: Route.MetaFunction = () => [{ title: "A new password · Alidade" }];
 
-export const action = answeredAction(async ({ request }: Route.ActionArgs) => {
-  await requestReset(parseInput(RequestReset, await readForm(request)), visitorOf(request).address);
+export const action = answeredAction(async ({ request, context }: Route.ActionArgs) => {
+  await requestReset(parseInput(RequestReset, await readForm(request)), visitorOf(request, context));
   return { problem: undefined, sent: true };
 });
 

@@ -11,6 +11,9 @@ test("only a path of our own is followed after signing in", () => {
     "/\\evil.example",
     "https://evil.example",
     "/\t/evil.example",
+    "/.//evil.example",
+    "/stars/..//evil.example",
+    "/%2e//evil.example",
   ]) {
     const path = ownPath(foreign);
     expect(new URL(path, "http://here.example").origin, String(foreign)).toBe("http://here.example");

@@ -2,5 +2,7 @@
 export function ownPath(to: string | null): string {
   if (!to?.startsWith("/") || to.startsWith("//") || to.includes("\\")) return "/desk";
   const url = new URL(to, "http://own.invalid");
-  return url.origin === "http://own.invalid" ? url.pathname + url.search : "/desk";
+  // "/.//elsewhere" is ours while it is read, and "//elsewhere", which is not, once it is written down.
+  const isOwn = url.origin === "http://own.invalid" && !url.pathname.startsWith("//");
+  return isOwn ? url.pathname + url.search : "/desk";
 }

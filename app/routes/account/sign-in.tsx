@@ -1,8 +1,9 @@
 import { Form, Link, redirect } from "react-router";
 import { actorContext } from "#app/context.server.ts";
 import { answeredAction, readForm } from "#app/http.server.ts";
-import { authenticator } from "#app/people/authenticator.server.ts";
+import { authenticateForm } from "#app/people/authenticator.server.ts";
 import { setSessionToken } from "#app/people/session-cookie.server.ts";
+import { visitorOf } from "#app/people/visitor.server.ts";
 import { Field } from "#app/ui/Field.tsx";
 import { FormErrors } from "#app/ui/FormErrors.tsx";
 import { Notice } from "#app/ui/Notice.tsx";
@@ -21,10 +22,10 @@ export function loader({ request, context }: Route.LoaderArgs) {
   return { to, said: query.get("said") };
 }
 
-export const action = answeredAction(async ({ request }: Route.ActionArgs) => {
+export const action = answeredAction(async ({ request, context }: Route.ActionArgs) => {
   const copy = request.clone();
   const form = await readForm(request);
-  const { token, expiresAt } = await authenticator.authenticate("form", copy);
+  const { token, expiresAt } = await authenticateForm(copy, visitorOf(request, context));
   const to = form.get("to");
   return redirect(ownPath(typeof to === "string" ? to : null), {
     headers: { "Set-Cookie": await setSessionToken(token, expiresAt) },

@@ -82,7 +82,7 @@ export default function People({ loaderData, actionData }: Route.ComponentProps)
               hint="The invitation goes there; the link works once, for seven days."
               required
             />
-            <RoleBoxes error={form.error("roles")} held={[]} />
+            <RoleBoxes error={form.error("roles")} held={form.chosen("roles", [])} />
             <SubmitButton intent="invite" pending="Inviting…" className="justify-self-start">
               Send the invitation
             </SubmitButton>

@@ -58,6 +58,7 @@ export default function Person({ loaderData, actionData }: Route.ComponentProps)
   const { person, said } = loaderData;
   const { word, tone } = PERSON_STATE[person.state];
   const form = formState(actionData);
+  const roles = formState(actionData, {}, "roles");
   const hidden = (
     <>
       <input type="hidden" name="personId" value={person.id} />
@@ -81,7 +82,7 @@ export default function Person({ loaderData, actionData }: Route.ComponentProps)
       <div className="grid max-w-words gap-10">
         <Form method="post" className="grid gap-5">
           {hidden}
-          <RoleBoxes held={person.roles} error={form.error("roles")} />
+          <RoleBoxes held={roles.chosen("roles", person.roles)} error={form.error("roles")} />
           <SubmitButton intent="roles" className="justify-self-start">
             Keep these roles
           </SubmitButton>

@@ -9,6 +9,7 @@ import { authorise } from "#app/people/authorise.ts";
 import { shortCitation } from "./citation.ts";
 import { distanceOf, priorOf } from "./distance-of.ts";
 import { mayConfirm, mayReject } from "./judge-measurement.server.ts";
+import { ledgerMark } from "./ledger-mark.ts";
 import { readGate } from "./vet-record.server.ts";
 import { missingForVetting } from "./vetting-gate.ts";
 
@@ -41,6 +42,7 @@ export async function readRecord(actor: Actor | null, recordId: string) {
     names: names.map(({ name, language, preferred }) => ({ name, language, preferred })),
     identifiers: identifiers.map(({ catalogue, value }) => ({ catalogue, value })),
     ledger,
+    ledgerMark: ledgerMark(ledger),
     adopted,
     answer: distanceOf(adopted, priorOf(found.prior, found.priorScalePc)),
     sources,

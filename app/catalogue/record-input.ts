@@ -185,7 +185,14 @@ export const AdoptParallax = z
     }
   });
 
-export const VetRecord = z.object({ recordId: z.string(), version });
-export const UnvetRecord = VetRecord.extend({
+export const VetRecord = z.object({
+  recordId: z.string(),
+  version,
+  /** The ledger as the scientist saw it (ledger-mark.ts): what came to it since is not vetted unseen. */
+  ledger: z.string().optional(),
+});
+export const UnvetRecord = z.object({
+  recordId: z.string(),
+  version,
   reason: z.string().trim().min(1, "Say why.").max(1000, "At most 1000 characters."),
 });

@@ -5,8 +5,9 @@ import { type Change, change } from "#app/audit/change.server.ts";
 import type { Reader } from "#app/database/db.server.ts";
 import { auditEntry } from "#app/database/schema/audit.ts";
 import { measurement, type record } from "#app/database/schema/catalogue.ts";
-import { type FieldErrors, Forbidden, Invalid } from "#app/errors.ts";
+import { Conflict, type FieldErrors, Forbidden, Invalid } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
+import { ledgerMark } from "./ledger-mark.ts";
 import { closeRecord, openRecord, UNVETTED } from "./open-record.server.ts";
 import type { UnvetRecord, VetRecord } from "./record-input.ts";
 import { type GateFacts, missingForVetting } from "./vetting-gate.ts";
@@ -53,6 +54,9 @@ export async function vetRecord(actor: Actor | null, input: z.output<typeof VetR
     if (hands.includes(actor.personId)) {
       throw new Forbidden("You have entered some of this record yourself, so somebody else has to vet it.");
     }
+    if (input.ledger !== undefined && input.ledger !== ledgerMark(await readLedger(c, opened))) {
+      throw new Conflict("A measurement was added or judged since you opened this page. Look at it, then vet.");
+    }
     refuseMissing(facts);
     const set = { state: "vetted" as const, vettedBy: actor.personId, vettedAt: new Date() };
     await closeRecord(c, opened, input.version, set, { before: { state: "draft" }, after: { state: "vetted" } });
@@ -66,6 +70,10 @@ function refuseMissing(facts: GateFacts): void {
   const fields: FieldErrors = {};
   for (const { field, message } of missing) fields[field] = [message];
   throw new Invalid(fields, missing.map((one) => one.message).join(" "));
+}
+
+function readLedger(c: Change, of: RecordRow) {
+  return c.tx.select({ version: measurement.version }).from(measurement).where(eq(measurement.recordId, of.id));
 }
 
 /** What is cited and compared is vetted with its record. */

@@ -1,6 +1,6 @@
 import { expect, test } from "vitest";
 import { db } from "#app/database/db.server.ts";
-import { Forbidden, Invalid, Locked } from "#app/errors.ts";
+import { Conflict, Forbidden, Invalid, Locked } from "#app/errors.ts";
 import { parseInput } from "#app/parse-input.ts";
 import { makeMeasurement, makeRecord } from "#tests/factories/catalogue.ts";
 import { makeActor } from "#tests/factories/person.ts";
@@ -89,4 +89,14 @@ test("an editor takes back what they entered until it is vetted, and nothing of 
   const reject = { measurementId: earlier, version: 1, reason: "Superseded" };
   await expect(rejectMeasurement(editor, reject)).rejects.toBeInstanceOf(Forbidden);
   await rejectMeasurement(scientist, reject);
+});
+
+test("what came to the ledger after the page was opened is not vetted unseen", async () => {
+  const { editor, scientist, recordId } = await waiting();
+  const { ledgerMark } = await readRecord(scientist, recordId);
+  await makeMeasurement(editor, recordId, { quantity: "colour-bv", printed: "5", unit: "mag" });
+  const vet = (ledger: string) => vetRecord(scientist, { recordId, version: 2, ledger });
+  await expect(vet(ledgerMark)).rejects.toBeInstanceOf(Conflict);
+  expect((await readRecord(scientist, recordId)).record.state).toBe("draft");
+  await vet((await readRecord(scientist, recordId)).ledgerMark);
 });

@@ -1,8 +1,9 @@
 import { useState } from "react";
 import { Form } from "react-router";
+import { DEFAULT_LENGTH_PC } from "#app/catalogue/distance-query.ts";
 import { toCanonical } from "#app/catalogue/quantities.ts";
 import { PRIORS } from "#app/database/enums.ts";
-import { measurementText } from "#app/figures/office-numbers.ts";
+import { measurementText, plainNumber } from "#app/figures/office-numbers.ts";
 import type { FormProblem } from "#app/http.server.ts";
 import { Field } from "#app/ui/Field.tsx";
 import { FormErrors } from "#app/ui/FormErrors.tsx";
@@ -34,6 +35,8 @@ interface AdoptFormProps {
   choices: readonly Choice[];
   actionData: FormProblem | undefined;
 }
+
+const EDSD_HINT = `${plainNumber(DEFAULT_LENGTH_PC, "en")} for the whole sky (Astraatmadja & Bailer-Jones 2016).`;
 
 /** Until a prior is chosen (or without JavaScript) it may be either. */
 const SCALE_LABELS: Record<string, string> = {
@@ -85,7 +88,7 @@ export function AdoptForm({ record, choices, actionData }: AdoptFormProps) {
           label={SCALE_LABELS[prior] ?? "Its length or limit"}
           unit="pc"
           inputMode="decimal"
-          hint="Only with a prior."
+          hint={prior === "edsd" ? EDSD_HINT : "Only with a prior."}
           {...field("priorScalePc")}
           onChange={(event) => setScale(event.currentTarget.value)}
         />

@@ -7,6 +7,8 @@ import { formState } from "../form-state.ts";
 
 interface VettingPanelProps {
   record: { id: string; version: number; state: "draft" | "vetted" };
+  /** The ledger as it is shown. */
+  ledgerMark: string;
   missing: readonly { field: string; message: string }[];
   isOwnWork: boolean;
   mayVet: boolean;
@@ -45,7 +47,7 @@ function Seen({ record }: Pick<VettingPanelProps, "record">) {
   );
 }
 
-function Vet({ record, missing, isOwnWork, mayVet }: VettingPanelProps) {
+function Vet({ record, ledgerMark, missing, isOwnWork, mayVet }: VettingPanelProps) {
   if (!mayVet) return null;
   if (isOwnWork) {
     return <p className="mt-2 text-ink-soft">You have entered some of it, so somebody else has to vet it.</p>;
@@ -54,6 +56,7 @@ function Vet({ record, missing, isOwnWork, mayVet }: VettingPanelProps) {
   return (
     <Form method="post" className="mt-4">
       <Seen record={record} />
+      <input type="hidden" name="ledger" value={ledgerMark} />
       <SubmitButton intent="vet">Vet this record</SubmitButton>
     </Form>
   );

@@ -1,3 +1,4 @@
+import { useNavigation } from "react-router";
 import { Notice } from "#app/ui/Notice.tsx";
 import { Table } from "#app/ui/Table.tsx";
 
@@ -14,6 +15,9 @@ interface TheirsAndYoursProps {
 
 /** Somebody else saved first: what they kept beside what was typed. The form below still holds what was typed. */
 export function TheirsAndYours({ labels, theirs, yours, say = (_, value) => value }: TheirsAndYoursProps) {
+  // The refusal is here a moment before the page has been read again: until then "theirs" would be what it was.
+  const reading = useNavigation().state !== "idle";
+  if (reading) return null;
   const rows = Object.entries(labels)
     .map(([field, label]) => ({
       field,

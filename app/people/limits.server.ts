@@ -60,3 +60,8 @@ function waitWords(seconds: number): string {
 export async function forgetAttempts(name: LimitName, who: string): Promise<void> {
   await limiter(name).delete(limiterKey(who));
 }
+
+/** A success was no guess: that one attempt is given back, the others stay counted. */
+export async function forgiveAttempt(name: LimitName, who: string): Promise<void> {
+  await limiter(name).reward(limiterKey(who), 1);
+}

@@ -7,7 +7,7 @@ import { newId } from "#app/database/new-id.ts";
 import { person, personRole, session } from "#app/database/schema/people.ts";
 import { Invalid } from "#app/errors.ts";
 import type { SignIn } from "./input.ts";
-import { countAttempt, forgetAttempts } from "./limits.server.ts";
+import { countAttempt, forgetAttempts, forgiveAttempt } from "./limits.server.ts";
 import { passwordMatches } from "./password.server.ts";
 import { ABSOLUTE_MS } from "./session-limits.ts";
 import { newToken, tokenHash } from "./token.server.ts";
@@ -30,6 +30,7 @@ export async function signIn(
   const right = await passwordMatches(found?.passwordHash, input.password);
   if (!found || !right || found.state !== "active") throw new Invalid({ "": [REFUSED] });
   await forgetAttempts("sign-in-account", input.email);
+  await forgiveAttempt("sign-in-address", neighbourhood(visitor.address));
   const roles = await db().select().from(personRole).where(eq(personRole.personId, found.id));
   const actor: Actor = {
     personId: found.id,

@@ -1,5 +1,10 @@
 import { expect, inject, test } from "vitest";
 import { expectNoSeriousAxe, newPage } from "./browser.ts";
+import { ROUTE_ACCESS } from "./route-access.ts";
+
+const paths = Object.keys(ROUTE_ACCESS).map(
+  (path) => `/${path.replace(/:\w+/g, "x").replace("*", "nothing").replace(/^\//, "")}`,
+);
 
 // What anybody meets before signing in, as `npm start` serves it.
 
@@ -46,17 +51,16 @@ test("an address where nothing is kept says so, with 404", async () => {
 });
 
 test.each([
-  // The framework's own check of pages answers first, with 400.
-  ["a page", "/sign-in", { Origin: "http://elsewhere.example" }, 400],
-  ["a page, not saying where it comes from", "/sign-in", {}, 403],
-  ["an address without a page", "/theme", { Origin: "http://elsewhere.example" }, 403],
-  ["an address without a page, not saying where it comes from", "/theme", {}, 403],
-])("a form posted from another site to %s is refused", async (_name, path, origin, status) => {
-  const answer = await fetch(`${inject("baseUrl")}${path}`, {
-    method: "POST",
-    headers: { "Content-Type": "application/x-www-form-urlencoded", ...origin },
-    body: "email=a@b.example&password=x&theme=dark",
-    redirect: "manual",
-  });
-  expect(answer.status).toBe(status);
+  ["elsewhere", { Origin: "http://elsewhere.example" }],
+  ["a sandboxed frame", { Origin: "null" }],
+  ["nowhere that it says", {}],
+])("an unsafe request from %s is refused at every address, with our headers", async (_name, origin) => {
+  for (const path of paths) {
+    for (const method of ["POST", "PUT", "PATCH", "DELETE"]) {
+      const answer = await fetch(inject("baseUrl") + path, { method, headers: origin, redirect: "manual" });
+      expect([method, path, answer.status]).toEqual([method, path, 403]);
+      expect(answer.headers.get("x-request-id"), path).toBeTruthy();
+      await answer.body?.cancel();
+    }
+  }
 });

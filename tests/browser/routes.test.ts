@@ -1,3 +1,4 @@
+import { readdirSync, readFileSync } from "node:fs";
 import type { RouteConfigEntry } from "@react-router/dev/routes";
 import { beforeAll, expect, inject, test } from "vitest";
 import routes from "#app/routes.ts";
@@ -10,14 +11,16 @@ const ROLES = ["editor", "scientist", "publisher", "admin"] as const;
 type Who = (typeof ROLES)[number] | "nobody";
 const EVERYBODY: Who[] = ["nobody", ...ROLES];
 
-function flatten(entries: RouteConfigEntry[]): string[] {
-  return entries.flatMap((entry) => [
-    ...(entry.index ? ["/"] : entry.path ? [entry.path] : []),
-    ...flatten(entry.children ?? []),
+function flatten(entries: RouteConfigEntry[]): { path: string; file: string }[] {
+  return entries.flatMap(({ index, path, file, children }) => [
+    ...(index || path ? [{ path: path ?? "/", file }] : []),
+    ...flatten(children ?? []),
   ]);
 }
 
-const paths = flatten(await routes);
+const map = flatten(await routes);
+const paths = map.map(({ path }) => path);
+const sourceOf = (file: string) => readFileSync(`app/${file}`, "utf8");
 const base = inject("baseUrl");
 const cookies = new Map<Who, string>();
 const params = new Map<string, string>();
@@ -77,6 +80,30 @@ const toSignIn = (answer: Response) =>
 
 test("every address of the map is in the table, and nothing else", () => {
   expect(Object.keys(ROUTE_ACCESS).sort()).toEqual([...paths].sort());
+});
+
+/** Answer by an action whatever is asked of them: that here nothing is kept, or that nothing can be changed. */
+const REFUSE_ALL = ["api/distance", "api/*", "*", "pattern-book"];
+
+test("every address that takes forms says in the table who may send them", () => {
+  const acting = map.filter(({ file }) => /export (?:const|async function) action\b/.test(sourceOf(file)));
+  const told = paths.filter((path) => ROUTE_ACCESS[path]?.post);
+  expect([...told, ...REFUSE_ALL].sort()).toEqual(acting.map(({ path }) => path).sort());
+});
+
+test("every intent that a page sends or understands is in the table", () => {
+  const known = new Set(posts.map(({ intent }) => intent));
+  const sources = readdirSync("app/routes", { recursive: true, encoding: "utf8" }).filter(
+    (file) => /\.tsx?$/.test(file) && !/\.test\.|pattern-book/.test(file),
+  );
+  const intents = sources.flatMap((file) => {
+    const text = sourceOf(`routes/${file}`);
+    const sent = [...text.matchAll(/\bintent="([\w-]+)"|name="intent" value="([\w-]+)"/g)];
+    const switched = text.includes('get("intent")') ? [...text.matchAll(/case "([\w-]+)":/g)] : [];
+    return [...sent, ...switched].map((match) => ({ file, intent: match[1] ?? match[2] ?? "" }));
+  });
+  expect(intents.length).toBeGreaterThan(20);
+  expect(intents.filter(({ intent }) => !known.has(intent))).toEqual([]);
 });
 
 test.each(paths)("GET %s opens to whom it should, and to nobody else", async (path) => {
@@ -191,6 +218,36 @@ test("pages and resource routes carry the usual headers, and every script the no
     for (const [tag] of html.matchAll(/<script[^>]*>/g)) expect(tag).toContain(`nonce="${nonce}"`);
     expect(html).not.toMatch(/\son\w+="/);
   }
+});
+
+test("an address that cannot be posted to says which methods it answers", async () => {
+  for (const path of ["/healthz", "/readyz", "/feed/nearest-suns.json", "/api/distance", "/k/entrance"]) {
+    const answer = await post(path, "", {});
+    expect([path, answer.status, answer.headers.get("allow")]).toEqual([path, 405, "GET, HEAD"]);
+    await answer.body?.cancel();
+  }
+  for (const path of ["/sign-out", "/theme"]) {
+    const answer = await fetch(base + path, { method: "DELETE", headers: { Origin: base } });
+    expect([path, answer.status, answer.headers.get("allow")]).toEqual([path, 405, "POST"]);
+    expect(answer.headers.get("content-type")).toBe("application/problem+json");
+  }
+});
+
+test("too many attempts are told when to come back, whatever address they claim to come from", async () => {
+  let answer: Response | undefined;
+  for (let attempt = 0; attempt < 11; attempt += 1) {
+    const headers = { Origin: base, "X-Forwarded-For": `203.0.113.${attempt}` };
+    const body = new URLSearchParams({ email: "ghost@tern-point.example", password: "wrong" });
+    answer = await fetch(`${base}/sign-in`, { method: "POST", headers, body, redirect: "manual" });
+    await answer.body?.cancel();
+  }
+  expect(answer?.status).toBe(429);
+  expect(Number(answer?.headers.get("retry-after"))).toBeGreaterThan(0);
+});
+
+test("a session says from which address it came: the connection's own", async () => {
+  const html = await (await get("/account", cookies.get("editor") ?? "")).text();
+  expect(html).toContain("127.0.0.1");
 });
 
 test("the session's cookie cannot be read by scripts and does not follow from other sites", async () => {

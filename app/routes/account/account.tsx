@@ -101,7 +101,10 @@ export default function Account({ loaderData, actionData }: Route.ComponentProps
               cell: (row) => (
                 <>
                   {row.isThisOne ? "This browser" : "Another browser"}
-                  <div className="max-w-[28rem] text-sm font-normal text-ink-soft">{row.userAgent || "unknown"}</div>
+                  <div className="max-w-[28rem] text-sm font-normal text-ink-soft">
+                    {row.userAgent || "unknown"}
+                    {row.address ? ` · from ${row.address}` : ""}
+                  </div>
                 </>
               ),
             },

@@ -2,12 +2,12 @@ import { and, eq, ne } from "drizzle-orm";
 import type { Actor } from "#app/audit/actor.ts";
 import { type Change, change } from "#app/audit/change.server.ts";
 import { newId } from "#app/database/new-id.ts";
-import { measurement, source } from "#app/database/schema/catalogue.ts";
-import { Invalid } from "#app/errors.ts";
+import { measurement } from "#app/database/schema/catalogue.ts";
 import { authorise } from "#app/people/authorise.ts";
 import type { NewMeasurement } from "./measurement-input.ts";
 import { openRecord } from "./open-record.server.ts";
 import { QUANTITY_FACTS, toCanonical } from "./quantities.ts";
+import { requireSource } from "./require-source.server.ts";
 
 /** The columns behind a measurement; also how intake writes them. */
 export function measurementColumns(input: NewMeasurement, enteredBy: string) {
@@ -33,10 +33,7 @@ async function insertMeasurement(c: Change, input: NewMeasurement): Promise<stri
     c.unchanged();
     return same;
   }
-  if (input.sourceId) {
-    const [known] = await c.tx.select({ id: source.id }).from(source).where(eq(source.id, input.sourceId));
-    if (!known) throw new Invalid({ sourceId: ["There is no such source."] });
-  }
+  await requireSource(c, "sourceId", input.sourceId);
   const id = newId();
   await c.tx.insert(measurement).values({ id, ...measurementColumns(input, c.actor.personId) });
   c.audit({

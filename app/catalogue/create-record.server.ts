@@ -10,6 +10,7 @@ import { Conflict } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
 import type { CreateRecord } from "./record-input.ts";
 import { writeNames } from "./record-names.server.ts";
+import { requireSource } from "./require-source.server.ts";
 
 export type NewRecord = z.output<typeof CreateRecord>;
 
@@ -30,9 +31,10 @@ export function recordColumns(input: NewRecord) {
   };
 }
 
-/** Writes a record inside a change. @throws Invalid at `identifiers` */
+/** Writes a record inside a change. @throws Invalid at `identifiers`, `positionSourceId` */
 async function insertRecord(c: Change, recordId: string, input: NewRecord): Promise<string> {
   const { submission: _, ...after } = input;
+  await requireSource(c, "positionSourceId", input.positionSourceId);
   await c.tx.insert(record).values({ id: recordId, ...recordColumns(input), createdBy: c.actor.personId });
   await writeNames(c, recordId, input);
   c.audit({ objectType: "record", objectId: recordId, objectName: input.name, after });

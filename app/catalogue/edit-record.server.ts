@@ -6,6 +6,7 @@ import { recordColumns } from "./create-record.server.ts";
 import { closeRecord, openRecord, UNVETTED } from "./open-record.server.ts";
 import type { EditRecord } from "./record-input.ts";
 import { readNames, writeNames } from "./record-names.server.ts";
+import { requireSource } from "./require-source.server.ts";
 
 /** Names, identifiers, kind and position. A vetted record is a draft again. @throws Conflict, Invalid, NotFound */
 export async function editRecord(actor: Actor | null, input: z.output<typeof EditRecord>): Promise<void> {
@@ -21,6 +22,7 @@ export async function editRecord(actor: Actor | null, input: z.output<typeof Edi
     };
     const after = { ...columns, otherNames: input.otherNames, identifiers: input.identifiers };
     if (JSON.stringify(before) === JSON.stringify(after)) return c.unchanged();
+    await requireSource(c, "positionSourceId", input.positionSourceId);
     await writeNames(c, opened.id, input);
     await closeRecord(c, opened, input.version, { ...columns, ...UNVETTED }, { before, after });
   });

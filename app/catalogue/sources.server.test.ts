@@ -103,3 +103,15 @@ test("a source's page names each record that rests on it once; the list counts m
   expect(page.users.map((user) => user.id)).toEqual([recordId]);
   expect((await readSources(editor)).find((one) => one.id === sourceId)?.uses).toBe(2);
 });
+
+test("a source that does not exist is refused at its field, in records and in measurements", async () => {
+  const editor = await makeActor("editor");
+  const gone = newId();
+  await expect(makeRecord(editor, { positionSourceId: gone })).rejects.toMatchObject({
+    fields: { positionSourceId: ["There is no such source."] },
+  });
+  const recordId = await makeRecord(editor);
+  await expect(makeMeasurement(editor, recordId, { sourceId: gone })).rejects.toMatchObject({
+    fields: { sourceId: ["There is no such source."] },
+  });
+});

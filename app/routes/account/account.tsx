@@ -17,6 +17,7 @@ import { Time } from "#app/ui/Time.tsx";
 import { formState } from "../form-state.ts";
 import { ROLE_WORDS } from "../office-places.ts";
 import type { Route } from "./+types/account";
+import { browserWords } from "./browser-words.ts";
 
 export const meta: Route.MetaFunction = () => [{ title: "Your account · Alidade" }];
 
@@ -52,7 +53,7 @@ export default function Account({ loaderData, actionData }: Route.ComponentProps
     <>
       <PageHead title="Your account" subtitle={account.email} />
       {said && SAID[said] && !actionData ? <Notice tone="success">{SAID[said]}</Notice> : null}
-      <div className="grid gap-14 lg:grid-cols-[2fr_3fr]">
+      <div className="grid items-start gap-14 lg:grid-cols-[2fr_3fr]">
         <section>
           <h2 className="mb-1">{account.name}</h2>
           <p className="mb-8 text-ink-soft">{account.roles.map((role) => ROLE_WORDS[role]).join(", ")}</p>
@@ -101,9 +102,9 @@ export default function Account({ loaderData, actionData }: Route.ComponentProps
               cell: (row) => (
                 <>
                   {row.isThisOne ? "This browser" : "Another browser"}
-                  <div className="max-w-[28rem] text-sm font-normal text-ink-soft">
-                    {row.userAgent || "unknown"}
-                    {row.address ? ` · from ${row.address}` : ""}
+                  <div className="text-sm font-normal text-ink-soft">
+                    {browserWords(row.userAgent)}
+                    {row.address ? `, from ${row.address}` : ""}
                   </div>
                 </>
               ),
@@ -114,6 +115,7 @@ export default function Account({ loaderData, actionData }: Route.ComponentProps
               id: "end",
               head: "End it",
               headHidden: true,
+              className: "whitespace-nowrap",
               cell: (row) =>
                 row.isThisOne ? null : (
                   <Form method="post">

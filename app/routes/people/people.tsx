@@ -35,7 +35,7 @@ export default function People({ loaderData, actionData }: Route.ComponentProps)
   return (
     <>
       <PageHead title="People" subtitle="Nobody signs their own work, whatever roles they hold." />
-      <div className="grid gap-14 lg:grid-cols-[3fr_2fr]">
+      <div className="grid items-start gap-14 lg:grid-cols-[3fr_2fr]">
         <Table
           caption="Everybody with an account"
           captionHidden

@@ -45,7 +45,7 @@ export default function Audit({ loaderData }: Route.ComponentProps) {
           ) : null
         }
       />
-      <Form method="get" className="mb-8 flex flex-wrap items-end gap-4">
+      <Form method="get" action="/audit" className="mb-8 flex flex-wrap items-end gap-4">
         <Select
           label="What was changed"
           name="type"

@@ -18,6 +18,7 @@ import { SubmitButton } from "#app/ui/SubmitButton.tsx";
 import { Table } from "#app/ui/Table.tsx";
 import { TextArea } from "#app/ui/TextArea.tsx";
 import { Time } from "#app/ui/Time.tsx";
+import { readAgainAfterConflict } from "../after-conflict.ts";
 import type { Route } from "./+types/exhibit-editions";
 
 export const meta: Route.MetaFunction = ({ loaderData }) => [
@@ -32,6 +33,8 @@ export const loader = answered(async ({ context, params, request }: Route.Loader
     said: new URL(request.url).searchParams.get("said"),
   };
 });
+
+export const shouldRevalidate = readAgainAfterConflict;
 
 export const action = answeredAction(async ({ request, context, params }: Route.ActionArgs) => {
   const actor = requireActor(context);

@@ -25,6 +25,7 @@ import { SortableList } from "#app/ui/SortableList.tsx";
 import { StateMark } from "#app/ui/StateMark.tsx";
 import { SubmitButton } from "#app/ui/SubmitButton.tsx";
 import { TextArea } from "#app/ui/TextArea.tsx";
+import { readAgainAfterConflict } from "../after-conflict.ts";
 import { formState } from "../form-state.ts";
 import type { Route } from "./+types/exhibit";
 import { CheckList } from "./CheckList.tsx";
@@ -45,6 +46,8 @@ export const loader = answered(async ({ context, params, request }: Route.Loader
     said: new URL(request.url).searchParams.get("said"),
   };
 });
+
+export const shouldRevalidate = readAgainAfterConflict;
 
 export const action = answeredAction(async ({ request, context, params }: Route.ActionArgs) => {
   const actor = requireActor(context);

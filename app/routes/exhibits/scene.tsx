@@ -17,6 +17,7 @@ import type { PageHandle } from "#app/ui/page-handle.ts";
 import { StateMark } from "#app/ui/StateMark.tsx";
 import { SubmitButton } from "#app/ui/SubmitButton.tsx";
 import { Tabs } from "#app/ui/Tabs.tsx";
+import { readAgainAfterConflict } from "../after-conflict.ts";
 import type { Route } from "./+types/scene";
 import { CastList } from "./CastList.tsx";
 import { CheckList } from "./CheckList.tsx";
@@ -37,6 +38,8 @@ export const loader = answered(async ({ context, params }: Route.LoaderArgs) => 
   const [page, records] = await Promise.all([readScene(actor, params.exhibit, params.scene), readRecordChoices(actor)]);
   return { ...page, records, mayWrite: mayDo(actor.roles, "exhibit.write") };
 });
+
+export const shouldRevalidate = readAgainAfterConflict;
 
 export const action = answeredAction(async ({ request, context, params }: Route.ActionArgs) =>
   actOnScene(requireActor(context), await readForm(request), params, new URL(request.url)),

@@ -17,6 +17,7 @@ import { Pager } from "#app/ui/Pager.tsx";
 import { StateMark } from "#app/ui/StateMark.tsx";
 import { SubmitButton } from "#app/ui/SubmitButton.tsx";
 import { Table } from "#app/ui/Table.tsx";
+import { readAgainAfterConflict } from "../after-conflict.ts";
 import { formState } from "../form-state.ts";
 import type { Route } from "./+types/intake";
 import { MappingForm } from "./MappingForm.tsx";
@@ -31,6 +32,8 @@ export const loader = answered(async ({ context, params, request }: Route.Loader
   const from = Math.max(0, Number(query.get("problems") ?? 0) || 0);
   return { ...(await readIntake(requireActor(context), params.intake, from)), said: query.get("said") };
 });
+
+export const shouldRevalidate = readAgainAfterConflict;
 
 export const action = answeredAction(async ({ request, context, params }: Route.ActionArgs) => {
   const actor = requireActor(context);

@@ -13,6 +13,7 @@ import { Notice } from "#app/ui/Notice.tsx";
 import { PageHead } from "#app/ui/PageHead.tsx";
 import { Select } from "#app/ui/Select.tsx";
 import { SubmitButton } from "#app/ui/SubmitButton.tsx";
+import { readAgainAfterConflict } from "../after-conflict.ts";
 import { formState } from "../form-state.ts";
 import type { Route } from "./+types/kiosk";
 import { KioskFields } from "./KioskFields.tsx";
@@ -30,6 +31,8 @@ export const loader = answered(async ({ context, params, request }: Route.Loader
     said: new URL(request.url).searchParams.get("said"),
   };
 });
+
+export const shouldRevalidate = readAgainAfterConflict;
 
 export const action = answeredAction(async ({ request, context, params }: Route.ActionArgs) => {
   const actor = requireActor(context);

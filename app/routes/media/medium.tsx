@@ -11,6 +11,7 @@ import { Notice } from "#app/ui/Notice.tsx";
 import { PageHead } from "#app/ui/PageHead.tsx";
 import { Picture } from "#app/ui/Picture.tsx";
 import { SubmitButton } from "#app/ui/SubmitButton.tsx";
+import { readAgainAfterConflict } from "../after-conflict.ts";
 import { formState } from "../form-state.ts";
 import type { Route } from "./+types/medium";
 import { MediaFields } from "./MediaFields.tsx";
@@ -27,6 +28,8 @@ export const loader = answered(async ({ context, params, request }: Route.Loader
     said: new URL(request.url).searchParams.get("said"),
   };
 });
+
+export const shouldRevalidate = readAgainAfterConflict;
 
 export const action = answeredAction(async ({ request, context, params }: Route.ActionArgs) => {
   await editMedia(requireActor(context), parseInput(EditMedia, await readForm(request)));

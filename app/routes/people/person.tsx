@@ -13,6 +13,7 @@ import { Notice } from "#app/ui/Notice.tsx";
 import { PageHead } from "#app/ui/PageHead.tsx";
 import { StateMark } from "#app/ui/StateMark.tsx";
 import { SubmitButton } from "#app/ui/SubmitButton.tsx";
+import { readAgainAfterConflict } from "../after-conflict.ts";
 import { formState } from "../form-state.ts";
 import type { Route } from "./+types/person";
 import { PERSON_STATE } from "./person-state.ts";
@@ -32,6 +33,8 @@ const VERBS = {
   deactivate: { act: deactivatePerson, said: "closed" },
   reactivate: { act: reactivatePerson, said: "opened" },
 } as const;
+
+export const shouldRevalidate = readAgainAfterConflict;
 
 export const action = answeredAction(async ({ request, context, params }: Route.ActionArgs) => {
   const actor = requireActor(context);

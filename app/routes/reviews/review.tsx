@@ -17,6 +17,7 @@ import { PageHead } from "#app/ui/PageHead.tsx";
 import { StateMark } from "#app/ui/StateMark.tsx";
 import { SubmitButton } from "#app/ui/SubmitButton.tsx";
 import { TextArea } from "#app/ui/TextArea.tsx";
+import { readAgainAfterConflict } from "../after-conflict.ts";
 import { CheckList } from "../exhibits/CheckList.tsx";
 import { SealHistory } from "../exhibits/SealHistory.tsx";
 import { EXHIBIT_STATE } from "../exhibits/words.ts";
@@ -35,6 +36,8 @@ export const loader = answered(async ({ context, params, request }: Route.Loader
     said: new URL(request.url).searchParams.get("said"),
   };
 });
+
+export const shouldRevalidate = readAgainAfterConflict;
 
 export const action = answeredAction(async ({ request, context, params }: Route.ActionArgs) => {
   const actor = requireActor(context);

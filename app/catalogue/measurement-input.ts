@@ -1,25 +1,8 @@
 import { z } from "zod";
 import { QUANTITIES } from "#app/database/enums.ts";
+import { julianEpoch, optionalText } from "#app/input-fields.ts";
 import { measuredNumberText, parsePrinted } from "./printed-value.ts";
 import { knownUnit, QUANTITY_FACTS } from "./quantities.ts";
-
-const optionalText = (most: number) =>
-  z
-    .string()
-    .trim()
-    .max(most, `At most ${most} characters.`)
-    .default("")
-    .transform((text) => text || null);
-
-const epoch = z
-  .string()
-  .trim()
-  .default("")
-  .transform((text) => text.replace(/^J/i, ""))
-  .refine((text) => text === "" || (/^\d{4}(\.\d+)?$/.test(text) && Number(text) >= 1700 && Number(text) <= 2100), {
-    error: "A Julian year between 1700 and 2100, such as 1991.25.",
-  })
-  .transform((text) => text || null);
 
 /** A measurement as a person enters it: the printed text, and what it means. */
 export const AddMeasurement = z
@@ -30,7 +13,7 @@ export const AddMeasurement = z
     printed: z.string().trim().min(1, "Enter what the source prints.").max(100, "At most 100 characters."),
     error: z.string().trim().max(40, "At most 40 characters.").default(""),
     unit: z.string().trim().min(1, "Choose a unit."),
-    epoch,
+    epoch: julianEpoch,
     sourceId: z
       .string()
       .default("")

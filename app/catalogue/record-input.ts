@@ -1,14 +1,7 @@
 import { z } from "zod";
 import { parseDeclination, parseRightAscension } from "#app/astrometry/coordinates.ts";
 import { LANGUAGES, PRIORS, RECORD_KINDS } from "#app/database/enums.ts";
-
-const optional = (most: number) =>
-  z
-    .string()
-    .trim()
-    .max(most, `At most ${most} characters.`)
-    .default("")
-    .transform((text) => text || null);
+import { julianEpoch, optionalText } from "#app/input-fields.ts";
 
 const angle = (parse: (text: string) => number) =>
   z
@@ -25,16 +18,6 @@ const angle = (parse: (text: string) => number) =>
         return z.NEVER;
       }
     });
-
-const epoch = z
-  .string()
-  .trim()
-  .default("")
-  .transform((text) => text.replace(/^J/i, ""))
-  .refine((text) => text === "" || (/^\d{4}(\.\d+)?$/.test(text) && Number(text) >= 1700 && Number(text) <= 2100), {
-    error: "A Julian year between 1700 and 2100, such as 1991.25.",
-  })
-  .transform((text) => text || null);
 
 /** One other name a line: "fr: Véga", or "α Lyrae" for every language. */
 export interface OtherName {
@@ -133,10 +116,10 @@ const fields = {
   identifiers,
   ra: angle(parseRightAscension),
   dec: angle(parseDeclination),
-  positionEpoch: epoch,
-  positionSourceId: optional(26),
-  positionLocator: optional(200),
-  positionNote: optional(500),
+  positionEpoch: julianEpoch,
+  positionSourceId: optionalText(26),
+  positionLocator: optionalText(200),
+  positionNote: optionalText(500),
 };
 
 const wholePosition = (input: { ra: unknown; dec: unknown }) => (input.ra === null) === (input.dec === null);
@@ -172,7 +155,7 @@ export const AdoptParallax = z
     reason: z.string().trim().min(1, "Say why this one.").max(1000, "At most 1000 characters."),
     prior: z.enum(["none", ...PRIORS]).default("none"),
     priorScalePc: positive,
-    priorReason: optional(1000),
+    priorReason: optionalText(1000),
   })
   .superRefine((input, context) => {
     if (input.prior === "none") return;

@@ -1,15 +1,11 @@
 import { z } from "zod";
+import { optionalText, seenVersion } from "#app/input-fields.ts";
 
-const note = z
-  .string()
-  .trim()
-  .max(1000, "At most 1000 characters.")
-  .default("")
-  .transform((text) => text || null);
+const note = optionalText(1000);
 
 export const SignStep = z.object({
   exhibitId: z.string(),
-  version: z.coerce.number().int().positive(),
+  version: seenVersion,
   digest: z.string().regex(/^[0-9a-f]{64}$/, "Open the page again before you sign."),
   note,
 });

@@ -1,33 +1,26 @@
 import { z } from "zod";
 import { type FieldErrors, Invalid } from "#app/errors.ts";
+import { optionalText } from "#app/input-fields.ts";
 import { parseInput } from "#app/parse-input.ts";
 import { knownUnit, QUANTITY_FACTS } from "../quantities.ts";
 import { type ColumnUse, MEANINGS, quantityOf } from "./meanings.ts";
 import type { TableColumn } from "./table.ts";
 
-const text = (most: number) =>
-  z
-    .string()
-    .trim()
-    .max(most, `At most ${most} characters.`)
-    .default("")
-    .transform((value) => value || null);
-
-const epoch = text(12).refine((value) => value === null || /^J?\d{4}(\.\d+)?$/.test(value), {
+const epoch = optionalText(12).refine((value) => value === null || /^J?\d{4}(\.\d+)?$/.test(value), {
   error: "A Julian year, such as 2015.0.",
 });
 
 const Options = z.object({
-  sourceId: text(26),
-  locator: text(120),
+  sourceId: optionalText(26),
+  locator: optionalText(120),
   epoch: epoch.transform((value) => value?.replace(/^J/, "") ?? null),
   /** What rows without a name or identifier are called: this and the row's number. */
-  namePrefix: text(80),
+  namePrefix: optionalText(80),
   adopt: z
     .string()
     .optional()
     .transform((ticked) => ticked !== undefined),
-  adoptReason: text(1000),
+  adoptReason: optionalText(1000),
 });
 
 export type IntakeOptions = z.output<typeof Options>;

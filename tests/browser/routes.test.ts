@@ -134,7 +134,7 @@ test.each(posts)(
   "POST $path ($intent) is refused at the door to whom it should be",
   async ({ path, intent, who: access }) => {
     for (const who of EVERYBODY) {
-      // Signing out for real would end the session that the other tests use.
+      // Signing out for real would end the session that the other tests use; it has a test of its own.
       if (path === "sign-out" && who !== "nobody") continue;
       const cookie = cookies.get(who) ?? "";
       const more = {
@@ -218,6 +218,16 @@ test("pages and resource routes carry the usual headers, and every script the no
     for (const [tag] of html.matchAll(/<script[^>]*>/g)) expect(tag).toContain(`nonce="${nonce}"`);
     expect(html).not.toMatch(/\son\w+="/);
   }
+});
+
+test.each(ROLES)("signing out ends the session of a person who is %s, and of no other", async (role) => {
+  const [own, other] = [await signIn(role), cookies.get(role) ?? ""];
+  expect((await get("/account", own)).status).toBe(200);
+  const answer = await post("/sign-out", own, {});
+  expect(answer.headers.get("location")).toBe("/sign-in?said=signed-out");
+  expect(answer.headers.get("set-cookie")).toMatch(/^alidade=;.*Max-Age=0/);
+  expect(toSignIn(await get("/account", own))).toBe(true);
+  expect((await get("/account", other)).status).toBe(200);
 });
 
 test("an address that cannot be posted to says which methods it answers", async () => {

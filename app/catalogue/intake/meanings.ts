@@ -29,6 +29,10 @@ export function quantityOf(meaning: Meaning): Quantity | null {
   return QUANTITIES.find((one) => one === plain) ?? null;
 }
 
+/** In which positions are read: degrees, or parts that say themselves what they are. */
+const POSITION_UNIT = /^(deg(ree)?s?|angle\[deg\]|[hd]:m:s)$/i;
+export const isPositionUnit = (unit: string | null) => unit === null || POSITION_UNIT.test(unit.trim());
+
 const NAMES: [pattern: RegExp, meaning: Meaning, catalogue?: string][] = [
   [/^(name|main_id|star|object)$/i, "name"],
   [/^hip$/i, "identifier", "HIP"],
@@ -38,7 +42,7 @@ const NAMES: [pattern: RegExp, meaning: Meaning, catalogue?: string][] = [
   [/^(source_id|gaia_source_id|gaiadr3|dr3name|source)$/i, "identifier", "Gaia DR3"],
   [/^(_?ra(_?icrs|_?j2000|deg)?|raj2000)$/i, "ra"],
   [/^(_?de(c)?(_?icrs|_?j2000|deg)?|dej2000)$/i, "dec"],
-  [/^(e_plx|parallax_error|plx_err(or)?|sigma_parallax)$/i, "parallax-error"],
+  [/^(e_plx|e_parallax|parallax_err(or)?(_mas)?|plx_err(or)?|sigma_parallax)$/i, "parallax-error"],
   [/^(plx|parallax|par|parallax_mas)$/i, "parallax"],
   [/^(e_pmra|pmra_error)$/i, "proper-motion-ra-error"],
   [/^(pmra|pm_ra|pmra_cosdec)$/i, "proper-motion-ra"],
@@ -55,24 +59,29 @@ const NAMES: [pattern: RegExp, meaning: Meaning, catalogue?: string][] = [
 /** UCD1+ words of the IVOA that name what we keep. */
 const UCDS: [ucd: RegExp, meaning: Meaning][] = [
   [/^stat\.error;pos\.parallax/i, "parallax-error"],
-  [/^pos\.parallax/i, "parallax"],
-  [/^pos\.eq\.ra;meta\.main$/i, "ra"],
-  [/^pos\.eq\.dec;meta\.main$/i, "dec"],
+  [/^(pos\.parallax|pos_parlx)/i, "parallax"],
+  [/^pos\.eq\.ra(;meta\.main)?$|^pos_eq_ra_main$/i, "ra"],
+  [/^pos\.eq\.dec(;meta\.main)?$|^pos_eq_dec_main$/i, "dec"],
   [/^stat\.error;pos\.pm;pos\.eq\.ra/i, "proper-motion-ra-error"],
-  [/^pos\.pm;pos\.eq\.ra/i, "proper-motion-ra"],
+  [/^pos\.pm;pos\.eq\.ra|^pos_eq_pmra$/i, "proper-motion-ra"],
   [/^stat\.error;pos\.pm;pos\.eq\.dec/i, "proper-motion-dec-error"],
-  [/^pos\.pm;pos\.eq\.dec/i, "proper-motion-dec"],
+  [/^pos\.pm;pos\.eq\.dec|^pos_eq_pmdec$/i, "proper-motion-dec"],
+  [/^stat\.error;spect\.dopplerveloc/i, "radial-velocity-error"],
+  [/^spect\.dopplerveloc/i, "radial-velocity"],
+  [/^stat\.error;phot\.mag;em\.opt\.v/i, "magnitude-v-error"],
   [/^phot\.mag;em\.opt\.v/i, "magnitude-v"],
+  [/^phot\.color;em\.opt\.b;em\.opt\.v/i, "colour-bv"],
 ];
 
-/** What a column most likely means, by its name, then by its UCD; its unit where that is one of the quantity's. */
+/**
+ * What a column most likely means, by its name, then by its UCD. Where the file gives a unit that is none of the quantity's,
+ * none is guessed: a person has to say.
+ */
 export function recognise(column: TableColumn): ColumnUse {
   const named = NAMES.find(([pattern]) => pattern.test(column.name.trim()));
   const meaning = named?.[1] ?? UCDS.find(([ucd]) => ucd.test(column.ucd ?? ""))?.[1] ?? "ignore";
   const quantity = quantityOf(meaning);
-  const unit = quantity
-    ? ((column.unit && knownUnit(quantity, column.unit)) ?? QUANTITY_FACTS[quantity].canonical)
-    : null;
+  const unit = quantity ? knownUnit(quantity, column.unit ?? QUANTITY_FACTS[quantity].canonical) : null;
   return { meaning, unit, catalogue: named?.[2] ?? null };
 }
 

@@ -3,12 +3,18 @@ import { Invalid } from "#app/errors.ts";
 import { MOST_CELL, MOST_COLUMNS, MOST_ROWS, type Table, type TableColumn } from "./table.ts";
 
 const DELIMITERS = [",", ";", "\t"];
-/** What stands in a line of units under the head, as archives print it. */
-const UNIT = /^(|-+|deg|mas|mas\/yr|mas\.yr-1|arcsec|mag|km\/s|km\.s-1|yr|d|pc|"h:m:s"|"d:m:s"|h:m:s|d:m:s)$/i;
+/** Units that tell a line of units under the head from a row, as archives print them. */
+const UNIT = /^"?(deg|[mu]?as|[mu]?as[./]yr(-1|\*\*-1)?|arcsec|mag|km[./]s(-1|\*\*-1)?|h:m:s|d:m:s)"?$/i;
+/** Rows of another width that are read before a file that has hardly any others is given up. */
+const RAGGED = 200;
 
 function refuse(message: string): never {
   throw new Invalid({ file: [message] });
 }
+
+/** No number stands in a line of units, and at least one unit that is known. */
+const isUnits = (line: string[]) =>
+  line.some((cell) => UNIT.test(cell)) && line.every((cell) => cell === "" || Number.isNaN(Number(cell)));
 
 /** The delimiter that parts the head into the most columns. */
 function delimiterOf(head: string): string {
@@ -25,29 +31,14 @@ export function readCsv(text: string): Table {
   const head = text.split(/\r?\n/).find((line) => line.trim() !== "" && !line.startsWith("#")) ?? "";
   if (head.length > 100_000) refuse("The first line is longer than any head of a table. This does not look like CSV.");
   const delimiter = delimiterOf(head);
-  let lines: string[][];
-  try {
-    lines = parse(text, {
-      delimiter,
-      bom: true,
-      comment: "#",
-      comment_no_infix: true,
-      relax_column_count: true,
-      skip_empty_lines: true,
-      trim: true,
-      max_record_size: MOST_COLUMNS * MOST_CELL,
-      to: MOST_ROWS + 3,
-    });
-  } catch (error) {
-    return refuse(`This cannot be read as CSV: ${error instanceof Error ? error.message : error}.`);
-  }
+  const lines = linesOf(text, delimiter);
   const [names, ...rest] = lines;
   if (!names || names.length < 2) refuse("A table has at least two columns, parted by commas, semicolons or tabs.");
   if (names.length > MOST_COLUMNS)
     refuse(`More than ${MOST_COLUMNS} columns. This does not look like a table of records.`);
   if (names.some((name) => name === "" || name.length > 200)) refuse("The first line does not name every column.");
   if (new Set(names).size !== names.length) refuse("Two columns have the same name.");
-  const hasUnits = rest[0]?.every((cell) => UNIT.test(cell)) && rest[0].some((cell) => /[a-z]/i.test(cell));
+  const hasUnits = isUnits(rest[0] ?? []);
   const units = hasUnits ? rest[0] : undefined;
   const rulers = (line: string[]) => line.every((cell) => /^-+$/.test(cell));
   const data = rest.slice(hasUnits ? 1 : 0).filter((line) => !rulers(line));
@@ -57,4 +48,40 @@ export function readCsv(text: string): Table {
     (name, at): TableColumn => ({ name, unit: units?.[at]?.replace(/"/g, "") || null, ucd: null }),
   );
   return { format: "csv", columns, rows: data.map((cells, at) => ({ number: at + 1, cells })) };
+}
+
+function linesOf(text: string, delimiter: string): string[][] {
+  let [width, read, ragged] = [0, 0, 0];
+  const look = (line: string[]) => {
+    width ||= line.length;
+    read += 1;
+    if (line.length !== width) ragged += 1;
+    if (ragged > RAGGED && ragged * 2 > read) {
+      throw new Error(`hardly a row has the ${width} columns of the first line`);
+    }
+    return line;
+  };
+  try {
+    return parse(text, {
+      delimiter,
+      comment: "#",
+      comment_no_infix: true,
+      relax_column_count: true,
+      // Tab-separated archives print seconds of arc with bare quotation marks.
+      relax_quotes: delimiter === "\t",
+      skip_empty_lines: true,
+      trim: true,
+      max_record_size: MOST_COLUMNS * MOST_CELL,
+      to: MOST_ROWS + 3,
+      on_record: look,
+    });
+  } catch (error) {
+    return refuse(`This cannot be read as CSV: ${told(error)}.`);
+  }
+}
+
+/** The parser's own words may carry the whole cell: a sentence's worth is enough. */
+function told(error: unknown): string {
+  const words = error instanceof Error ? error.message : String(error);
+  return words.length > 200 ? `${words.slice(0, 200)}…` : words;
 }

@@ -3,6 +3,8 @@ import { Invalid } from "#app/errors.ts";
 import { MOST_CELL, MOST_COLUMNS, MOST_ROWS, type Table, type TableColumn, type TableRow } from "./table.ts";
 
 const MOST_DEPTH = 40;
+const DOCTYPE = /^(?:\s|<\?[^>]*>|<!--[\s\S]*?-->)*<!DOCTYPE/i;
+const NO_DOCTYPE = "This XML has a DOCTYPE, which a table does not need. It is not read.";
 
 function refuse(message: string): never {
   throw new Invalid({ file: [message] });
@@ -14,9 +16,11 @@ function refuse(message: string): never {
  * @throws Invalid at `file`
  */
 export function readVotable(text: string): Table {
+  // The parser tells of a DOCTYPE once it has read all of it; one that stands where it should is refused before.
+  if (DOCTYPE.test(text.slice(0, 4096))) refuse(NO_DOCTYPE);
   const reader = new TableReader();
   const parser = new SaxesParser({ position: true });
-  parser.on("doctype", () => refuse("This XML has a DOCTYPE, which a table does not need. It is not read."));
+  parser.on("doctype", () => refuse(NO_DOCTYPE));
   parser.on("opentag", (tag) => reader.open(tag.name, tag.attributes as Record<string, string>));
   parser.on("closetag", (tag) => reader.close(tag.name));
   parser.on("text", (chunk) => reader.text(chunk));
@@ -31,6 +35,8 @@ const local = (name: string) => name.slice(name.indexOf(":") + 1).toUpperCase();
 
 class TableReader {
   private columns: TableColumn[] = [];
+  /** What stands in a column for nothing (VALUES null="..."), by its place. */
+  private blanks = new Map<number, string>();
   private rows: TableRow[] = [];
   private cells: string[] | null = null;
   private cell: string | null = null;
@@ -45,6 +51,7 @@ class TableReader {
     if (this.depth === 1 && tag !== "VOTABLE") refuse("This XML is no VOTable.");
     if (this.done) return;
     if (tag === "FIELD") this.field(attributes);
+    if (tag === "VALUES" && attributes.null) this.blanks.set(this.columns.length - 1, attributes.null.trim());
     if (tag === "BINARY" || tag === "BINARY2" || tag === "FITS") {
       refuse(`This VOTable is written as ${tag}. Only TABLEDATA is read here: save it so and send it again.`);
     }
@@ -64,7 +71,8 @@ class TableReader {
     if (tag === "TABLE" && this.seen) this.done = true;
     if (this.done) return;
     if (tag === "TD" && this.cell !== null) {
-      this.cells?.push(this.cell.trim());
+      const text = this.cell.trim();
+      if (this.cells) this.cells.push(this.blanks.get(this.cells.length) === text ? "" : text);
       this.cell = null;
     }
     if (tag === "TR" && this.cells) {

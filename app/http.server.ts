@@ -1,6 +1,7 @@
 import { randomBytes } from "node:crypto";
 import { data, type MiddlewareFunction, type RouterContextProvider } from "react-router";
 import { nonceContext, requestIdContext, retryAfterContext } from "./context.server.ts";
+import { isConnectionError } from "./database/database-error.ts";
 import { env } from "./env.server.ts";
 import {
   AppError,
@@ -90,18 +91,26 @@ function comeBackLater(error: AppError, { context }: Asked): void {
  * What nobody foresaw: the log gets the error with the request's id, the page gets the id alone. Redirects and answers
  * that a loader throws on purpose are no errors and pass; a developer sees the error itself.
  */
-function broken(error: unknown, { context }: Asked): unknown {
+export function broken(error: unknown, { context }: Asked): unknown {
   if (!(error instanceof Error) || process.env.NODE_ENV === "development") return error;
   const requestId = context?.get(requestIdContext) ?? "";
   logBroken(requestId, error);
-  const { status, title, next } = answerForStatus(500);
+  const { status, title, next } = answerForStatus(isConnectionError(error) ? 503 : 500);
   const body: PageProblem = { kind: "broken", title, detail: null, next, requestId };
   return data(body, { status });
 }
 
-/** One line to find it by, then the error with its stack. */
+/** One line to find it by, then the error with its stack. What a query was given stays out: it may be a mailed link. */
 export function logBroken(requestId: string, error: unknown): void {
-  console.error(`request ${requestId || "without an id"}:`, error);
+  const query = error instanceof Error && "query" in error ? ` in ${String(error.query)}` : "";
+  console.error(`request ${requestId || "without an id"}${query}:`, query ? (error as Error).cause : error);
+}
+
+function brokenApi(error: unknown, { context }: Asked): Response {
+  const requestId = context?.get(requestIdContext) ?? "";
+  logBroken(requestId, error);
+  const { status, title, next } = answerForStatus(isConnectionError(error) ? 503 : 500);
+  return problem(status, title, `${next} The log knows this request as ${requestId}.`);
 }
 
 /** Wraps a page's loader: what a verb throws becomes the status and the words of the table in errors.ts. */
@@ -172,9 +181,7 @@ export function answeredApi<A extends Asked>(
     } catch (error) {
       if (error instanceof AppError) return problemFor(error);
       if (!(error instanceof Error)) throw error;
-      const requestId = args.context?.get(requestIdContext) ?? "";
-      logBroken(requestId, error);
-      return problem(500, answerForStatus(500).title, `Nothing was changed. The log knows it as ${requestId}.`);
+      return brokenApi(error, args);
     }
   };
 }
@@ -230,6 +237,22 @@ function contentSecurityPolicy(nonce: string): string {
   ].join("; ");
 }
 
+function answerToThrown(error: unknown, asked: Asked): Response {
+  return error instanceof Response ? error : brokenApi(error, asked);
+}
+
+/** What a middleware says for a page reaches an address without a page as plain JSON; it is a problem there too. */
+async function problemSaid(response: Response): Promise<Response> {
+  if (response.status < 400 || !response.headers.get("Content-Type")?.startsWith("application/json")) return response;
+  const said: Partial<PageProblem> | null = await response
+    .clone()
+    .json()
+    .catch(() => null);
+  if (!said?.title || !said.next) return response;
+  const known = said.requestId ? ` The log knows this request as ${said.requestId}.` : "";
+  return problem(response.status, said.title, (said.detail ?? said.next) + known);
+}
+
 const ONLY_LOOKED_AT = "GET, HEAD";
 
 /** A route without an action is refused by the router: a page as a page, anything else as a problem, both with Allow. */
@@ -245,7 +268,9 @@ export const hardenResponses: MiddlewareFunction<Response> = async ({ request, c
   const nonce = randomBytes(18).toString("base64");
   context.set(nonceContext, nonce);
   context.set(requestIdContext, randomBytes(9).toString("base64url"));
-  const response = methodSaid(await next());
+  // A page's failure comes back as its error page; what breaks before an address without a page is thrown to here.
+  const said = await next().catch((error: unknown) => answerToThrown(error, { context }));
+  const response = await problemSaid(methodSaid(said));
   const { headers } = response;
   const retryAfter = context.get(retryAfterContext);
   if (retryAfter !== null) headers.set("Retry-After", String(retryAfter));

@@ -47,6 +47,23 @@ test("what nobody foresaw is told by the request's id alone, on pages, by forms 
   }
 });
 
+test("a service that cannot be reached is 503, and the log keeps to itself what a query was given", async () => {
+  const log = vi.spyOn(console, "error").mockImplementation(() => {});
+  const refused = Object.assign(new Error("connect"), { code: "ECONNREFUSED", syscall: "connect" });
+  const failed = Object.assign(new Error("Failed query: ... params: the-token", { cause: refused }), {
+    query: "insert into `outbox` values (?)",
+    params: ["the-token"],
+  });
+  const answer = await answeredApi(() => {
+    throw failed;
+  })(asked());
+  expect(answer.status).toBe(503);
+  const logged = log.mock.calls.flat();
+  expect(logged[0]).toContain("insert into `outbox`");
+  expect(logged.map(String).join()).not.toContain("the-token");
+  expect(logged[1]).toBe(refused);
+});
+
 test("redirects and answers thrown on purpose pass", async () => {
   const away = new Response(null, { status: 302 });
   expect(

@@ -28,3 +28,14 @@ export function duplicateKey(error: unknown): string | undefined {
   }
   return undefined;
 }
+
+const AWAY = new Set(["ECONNREFUSED", "ECONNRESET", "ETIMEDOUT", "EPIPE"]);
+
+/** true where a service could not be reached at all, so that trying again later makes sense. */
+export function isConnectionError(error: unknown): boolean {
+  for (let at: unknown = error; at instanceof Error; at = at.cause) {
+    if ("code" in at && typeof at.code === "string" && "syscall" in at && AWAY.has(at.code)) return true;
+    if ("code" in at && at.code === "PROTOCOL_CONNECTION_LOST") return true;
+  }
+  return false;
+}

@@ -5,13 +5,14 @@ import { parseInput } from "#app/parse-input.ts";
 import { resetPassword } from "#app/people/choose-password.server.ts";
 import { ChoosePassword } from "#app/people/input.ts";
 import { readLink } from "#app/people/one-time-link.server.ts";
+import { errorTitle } from "../RouteError.tsx";
 import type { Route } from "./+types/reset-password";
 import { Gate } from "./Gate.tsx";
 import { PasswordForm } from "./PasswordForm.tsx";
 import { SpentLink } from "./SpentLink.tsx";
 
-export const meta: Route.MetaFunction = () => [
-  { title: "Choose a new password · Alidade" },
+export const meta: Route.MetaFunction = ({ error }) => [
+  { title: error ? errorTitle(error) : "Choose a new password · Alidade" },
   // The address holds a secret: it is not told to other places. (Our own origin check needs the Origin header.)
   { name: "referrer", content: "same-origin" },
 ];

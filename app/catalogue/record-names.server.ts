@@ -35,7 +35,7 @@ async function refuseTaken(c: Change, recordId: string, identifiers: Identifier[
 }
 
 /** Somebody else has just taken one of the identifiers: the change is run again, and then finds who. */
-function runAgain(error: unknown): never {
+export function runAgain(error: unknown): never {
   if (duplicateKey(error) !== "record_identifier_unique") throw error;
   throw Object.assign(new Error("An identifier was taken meanwhile", { cause: error }), { errno: CHANGED_SINCE_READ });
 }

@@ -1,14 +1,17 @@
+import { eq } from "drizzle-orm";
 import type { Actor } from "#app/audit/actor.ts";
 import { type Change, change } from "#app/audit/change.server.ts";
 import { compareAndSet } from "#app/database/compare-and-set.server.ts";
 import { db } from "#app/database/db.server.ts";
 import { newId } from "#app/database/new-id.ts";
-import { intake, measurement, record, recordIdentifier } from "#app/database/schema/catalogue.ts";
-import { Conflict, Locked } from "#app/errors.ts";
+import { intake, measurement, record, recordIdentifier, source } from "#app/database/schema/catalogue.ts";
+import { Conflict, Locked, NotFound } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
 import { measurementColumns } from "../add-measurement.server.ts";
 import { distanceOf } from "../distance-of.ts";
+import { runAgain } from "../record-names.server.ts";
 import type { IntakeOptions, Mapping } from "./mapping.ts";
+import type { Match } from "./match-records.server.ts";
 import { openIntake } from "./open-intake.server.ts";
 import { planIntake } from "./plan-intake.server.ts";
 import type { PlannedMeasurement, PlannedRow } from "./plan-row.ts";
@@ -42,21 +45,15 @@ export async function applyIntake(
   authorise(actor, "intake.write");
   const { table, mapping } = await openIntake(db(), input.intakeId);
   return change(actor, "intake.apply", async (c) => {
-    const opened = await openIntake(c.tx, input.intakeId);
-    if (opened.intake.state !== "uploaded") throw new Locked("This table was dealt with already.");
-    if (JSON.stringify(opened.mapping) !== JSON.stringify(mapping))
-      throw new Conflict("The columns were changed meanwhile.");
-    if (!mapping.options.sourceId) throw new Locked("Say first what the columns mean.");
+    const opened = await holdIntake(c, input.intakeId, mapping);
     const plan = await planIntake(c.tx, table, mapping);
     if (plan.badRows > 0 && !input.goodRowsOnly) {
-      throw new Locked(`${plan.badRows} rows are bad. Mend the file, or take the good rows only.`);
+      const rows = plan.badRows === 1 ? "1 row is bad." : `${plan.badRows} rows are bad.`;
+      throw new Locked(`${rows} Nothing was written. Mend the file, or take the good rows only.`);
     }
     const writing: Writing = { records: [], identifiers: [], measurements: [] };
     for (const row of plan.created) planRecord(c, writing, row, mapping, input.intakeId);
-    for (const row of plan.updated) {
-      addMeasurements(c, writing, row.recordId, row, mapping.options, input.intakeId);
-      c.touch({ type: "record", id: row.recordId });
-    }
+    for (const row of plan.updated) planAddition(c, writing, row, mapping.options, input.intakeId);
     await write(c, writing);
     const counts = { created: plan.created.length, updated: plan.updated.length, same: plan.same, bad: plan.badRows };
     await compareAndSet(c.tx, intake, input.intakeId, input.version, {
@@ -70,12 +67,60 @@ export async function applyIntake(
     c.audit({
       objectType: "intake",
       objectId: input.intakeId,
-      objectName: opened.intake.fileName,
+      objectName: opened.fileName,
       before: { state: "uploaded" },
       after: { state: "applied", ...counts },
     });
     return counts;
   });
+}
+
+const DEALT_WITH = {
+  applied: "This table is in the catalogue already. Nothing was written again.",
+  abandoned: "This table was given up. Send the file again to take it in.",
+};
+
+/**
+ * Holds the intake and its source until the change is done, before anything else is read: of two tables of one source the
+ * second one sees what the first one wrote.
+ */
+async function holdIntake(c: Change, intakeId: string, seen: Mapping) {
+  const [opened] = await c.tx.select().from(intake).where(eq(intake.id, intakeId)).for("update");
+  if (!opened) throw new NotFound("There is no such intake.");
+  if (opened.state !== "uploaded") throw new Locked(DEALT_WITH[opened.state]);
+  if (!seen.options.sourceId) throw new Locked("Say first what the columns mean.");
+  if (JSON.stringify(opened.mapping) !== JSON.stringify(seen)) {
+    throw new Conflict("The columns were changed meanwhile. Nothing was written.");
+  }
+  await c.tx.select({ id: source.id }).from(source).where(eq(source.id, seen.options.sourceId)).for("update");
+  return opened;
+}
+
+interface Added {
+  id: string;
+  from: PlannedMeasurement;
+}
+
+/** What the audit log keeps of a new measurement. */
+const noted = ({ id, from: { quantity, rawText, unit } }: Added) => ({ id, quantity, rawText, unit });
+
+/** A record there is gets what the row knows of it besides. */
+function planAddition(
+  c: Change,
+  writing: Writing,
+  row: PlannedRow & Match,
+  options: IntakeOptions,
+  intakeId: string,
+): void {
+  const added = addMeasurements(c, writing, row.recordId, row, options, intakeId);
+  c.audit({
+    objectType: "record",
+    objectId: row.recordId,
+    objectName: row.recordName,
+    after: { intake: intakeId, measurements: added.map(noted) },
+    note: `Row ${row.row} of an intake`,
+  });
+  c.touch({ type: "record", id: row.recordId });
 }
 
 function planRecord(c: Change, writing: Writing, row: PlannedRow, mapping: Mapping, intakeId: string): void {
@@ -90,7 +135,7 @@ function planRecord(c: Change, writing: Writing, row: PlannedRow, mapping: Mappi
     ...(row.position
       ? {
           ...row.position,
-          positionEpoch: options.epoch,
+          positionEpoch: options.positionEpoch ?? options.epoch,
           positionSourceId: options.sourceId,
           positionLocator: locatorOf(options, row, "position"),
         }
@@ -103,7 +148,11 @@ function planRecord(c: Change, writing: Writing, row: PlannedRow, mapping: Mappi
     objectType: "record",
     objectId: id,
     objectName: row.name,
-    after: columns,
+    after: {
+      ...columns,
+      identifiers: row.identifiers.map((one) => `${one.catalogue} ${one.value}`),
+      measurements: added.map(noted),
+    },
     note: `Row ${row.row} of an intake`,
   });
 }
@@ -118,7 +167,7 @@ function addMeasurements(
   row: PlannedRow,
   options: IntakeOptions,
   intakeId: string,
-): { id: string; from: PlannedMeasurement }[] {
+): Added[] {
   return row.measurements.map((from) => {
     const id = newId();
     const { column, ...planned } = from;
@@ -137,7 +186,7 @@ function addMeasurements(
 }
 
 /** Where the person asked for it, a new record's parallax counts at once. */
-function adopted(c: Change, options: IntakeOptions, added: { id: string; from: PlannedMeasurement }[]) {
+function adopted(c: Change, options: IntakeOptions, added: Added[]) {
   const parallax = options.adopt
     ? added.find((one) => one.from.quantity === "parallax" && one.from.error !== null)
     : null;
@@ -161,7 +210,10 @@ async function write(c: Change, { records, identifiers, measurements }: Writing)
     await c.tx.insert(record).values(records.slice(from, from + BATCH));
   }
   for (let from = 0; from < identifiers.length; from += BATCH) {
-    await c.tx.insert(recordIdentifier).values(identifiers.slice(from, from + BATCH));
+    await c.tx
+      .insert(recordIdentifier)
+      .values(identifiers.slice(from, from + BATCH))
+      .catch(runAgain);
   }
   for (let from = 0; from < measurements.length; from += BATCH) {
     await c.tx.insert(measurement).values(measurements.slice(from, from + BATCH));

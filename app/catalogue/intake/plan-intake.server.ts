@@ -1,7 +1,8 @@
 import { and, eq, inArray } from "drizzle-orm";
 import type { Reader } from "#app/database/db.server.ts";
-import { measurement, record, recordIdentifier } from "#app/database/schema/catalogue.ts";
+import { measurement } from "#app/database/schema/catalogue.ts";
 import type { Mapping } from "./mapping.ts";
+import { inBatches, type Match, matchRecords, type NamingColumns } from "./match-records.server.ts";
 import { type PlannedRow, type Problem, planRow } from "./plan-row.ts";
 import type { Table } from "./table.ts";
 
@@ -9,51 +10,80 @@ export interface IntakePlan {
   /** Rows that become new records. */
   created: PlannedRow[];
   /** Rows that add measurements to a record there is. */
-  updated: (PlannedRow & { recordId: string })[];
+  updated: (PlannedRow & Match)[];
   /** Rows of which everything is kept already. */
   same: number;
   badRows: number;
+  /** Everything that is wrong in bad rows. */
   problems: Problem[];
+  /** What a person should know of rows that are taken. */
+  warnings: Problem[];
 }
-
-const BATCH = 1000;
 
 /** What would become of a table. Nothing is written; applying works from the same plan. */
 export async function planIntake(reader: Reader, table: Table, mapping: Mapping): Promise<IntakePlan> {
   const rows = table.rows.map((row) => planRow(row, table.columns, mapping));
-  refuseRepeated(rows);
-  const good = rows.filter((row) => row.problems.length === 0);
-  const known = await findRecords(reader, good);
-  const kept = await findMeasurements(reader, [...new Set(known.values())], mapping.options.sourceId ?? "");
-  const plan: IntakePlan = {
-    created: [],
-    updated: [],
-    same: 0,
-    badRows: rows.length - good.length,
-    problems: rows.flatMap((row) => row.problems),
-  };
-  for (const row of good) {
-    const recordId = known.get(row.row);
-    if (!recordId) {
-      plan.created.push(row);
-      continue;
-    }
-    const fresh = row.measurements.filter((one) => !kept.has(keyOf(recordId, one)));
-    if (fresh.length === 0) plan.same += 1;
-    else plan.updated.push({ ...row, measurements: fresh, recordId });
-  }
+  const columns = namingColumns(table, mapping);
+  refuseRepeated(rows, columns);
+  const known = await matchRecords(reader, rows.filter(isGood), columns);
+  const recordIds = [...known.values()].map((one) => one.recordId);
+  const kept = await findMeasurements(reader, recordIds, mapping.options.sourceId ?? "");
+  const plan: IntakePlan = { created: [], updated: [], same: 0, badRows: 0, problems: [], warnings: [] };
+  for (const row of rows.filter(isGood)) place(plan, row, known.get(row.row), kept, columns);
+  const bad = rows.filter((row) => !isGood(row));
+  plan.badRows = bad.length;
+  plan.problems = bad.flatMap((row) => row.problems);
   return plan;
+}
+
+const isGood = (row: PlannedRow) => row.problems.length === 0;
+
+function place(
+  plan: IntakePlan,
+  row: PlannedRow,
+  match: Match | undefined,
+  kept: Set<string>,
+  columns: NamingColumns,
+): void {
+  const fresh = match ? row.measurements.filter((one) => !kept.has(keyOf(match.recordId, one))) : row.measurements;
+  if (match && fresh.length === 0) {
+    plan.same += 1;
+    return;
+  }
+  if (match?.byNumberOnly) {
+    const reason = "A record is called so already, and nothing says that it is the same star. Choose another prefix.";
+    row.problems.push({ row: row.row, column: columns.name, value: row.name, reason });
+    return;
+  }
+  plan.warnings.push(...row.warnings);
+  if (match) plan.updated.push({ ...row, measurements: fresh, ...match });
+  else plan.created.push(row);
+}
+
+function namingColumns(table: Table, mapping: Mapping): NamingColumns {
+  const nameAt = mapping.columns.findIndex((use) => use.meaning === "name");
+  const identifiers = mapping.columns.flatMap((use, at): [string, string][] =>
+    use.meaning === "identifier" && use.catalogue ? [[use.catalogue, table.columns[at]?.name ?? ""]] : [],
+  );
+  const prefix = mapping.options.namePrefix;
+  return {
+    name: table.columns[nameAt]?.name ?? "",
+    identifiers: new Map(identifiers),
+    numbered: (row) => prefix !== null && row.name === `${prefix} ${row.row}`,
+  };
 }
 
 const keyOf = (recordId: string, one: { quantity: string; value: string; error: string | null; unit: string }) =>
   [recordId, one.quantity, one.value, one.error ?? "", one.unit].join("\u0000");
 
 /** An identifier or a name that stands in two rows of the file: the second one is told. */
-function refuseRepeated(rows: PlannedRow[]): void {
+function refuseRepeated(rows: PlannedRow[], columns: NamingColumns): void {
   const first = new Map<string, number>();
   for (const row of rows) {
-    for (const { catalogue, value } of row.identifiers) note(first, row, `${catalogue} ${value}`, catalogue);
-    if (row.name) note(first, row, row.name, "name");
+    for (const { catalogue, value } of row.identifiers) {
+      note(first, row, `${catalogue} ${value}`, columns.identifiers.get(catalogue) ?? catalogue);
+    }
+    if (row.name) note(first, row, row.name, columns.name);
   }
 }
 
@@ -63,46 +93,13 @@ function note(first: Map<string, number>, row: PlannedRow, what: string, column:
   else row.problems.push({ row: row.row, column, value: what, reason: `It stands in row ${before} already.` });
 }
 
-/** Row number -> the record it belongs to: by identifier, else by exactly the same name. */
-async function findRecords(reader: Reader, rows: PlannedRow[]): Promise<Map<number, string>> {
-  const byIdentifier = new Map<string, string>();
-  const values = [...new Set(rows.flatMap((row) => row.identifiers.map((one) => one.value)))];
-  for (let from = 0; from < values.length; from += BATCH) {
-    const found = await reader
-      .select()
-      .from(recordIdentifier)
-      .where(inArray(recordIdentifier.value, values.slice(from, from + BATCH)));
-    for (const one of found) byIdentifier.set(`${one.catalogue} ${one.value}`, one.recordId);
-  }
-  const byName = new Map<string, string>();
-  const names = [...new Set(rows.map((row) => row.name))];
-  for (let from = 0; from < names.length; from += BATCH) {
-    const found = await reader
-      .select({ id: record.id, name: record.name })
-      .from(record)
-      .where(inArray(record.name, names.slice(from, from + BATCH)));
-    for (const one of found) byName.set(one.name.toLowerCase(), one.id);
-  }
-  const found = new Map<number, string>();
-  for (const row of rows) {
-    const ids = row.identifiers.map((one) => byIdentifier.get(`${one.catalogue} ${one.value}`));
-    const recordId = ids.find((id) => id !== undefined) ?? byName.get(row.name.toLowerCase());
-    if (recordId) found.set(row.row, recordId);
-  }
-  return found;
-}
-
 /** What these records have from this source already. */
 async function findMeasurements(reader: Reader, recordIds: string[], sourceId: string): Promise<Set<string>> {
-  const kept = new Set<string>();
-  for (let from = 0; from < recordIds.length; from += BATCH) {
-    const rows = await reader
+  const rows = await inBatches(recordIds, (some) =>
+    reader
       .select()
       .from(measurement)
-      .where(
-        and(inArray(measurement.recordId, recordIds.slice(from, from + BATCH)), eq(measurement.sourceId, sourceId)),
-      );
-    for (const row of rows) kept.add(keyOf(row.recordId, row));
-  }
-  return kept;
+      .where(and(inArray(measurement.recordId, some), eq(measurement.sourceId, sourceId))),
+  );
+  return new Set(rows.map((row) => keyOf(row.recordId, row)));
 }

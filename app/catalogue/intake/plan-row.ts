@@ -30,6 +30,8 @@ export interface PlannedRow {
   position: { raText: string; decText: string; raDeg: number; decDeg: number } | null;
   measurements: PlannedMeasurement[];
   problems: Problem[];
+  /** Nothing that keeps the row out, but a person should know. */
+  warnings: Problem[];
 }
 
 /** What a cell says when it says nothing. */
@@ -38,33 +40,47 @@ const BLANK = /^(|null|nan|--+|n\/a|\\N)$/i;
 /** Understands one row, and says of every cell that cannot be understood why. */
 export function planRow(row: TableRow, columns: TableColumn[], mapping: Mapping): PlannedRow {
   const problems: Problem[] = [];
+  const warnings: Problem[] = [];
   const { number, cells } = row;
   if (cells.length !== columns.length) {
     const reason = `The row has ${cells.length} cells, the head ${columns.length} columns.`;
     problems.push({ row: number, column: "", value: cells.join(", ").slice(0, 80), reason });
-    return { row: number, name: "", identifiers: [], position: null, measurements: [], problems };
+    return { row: number, name: "", identifiers: [], position: null, measurements: [], problems, warnings: [] };
   }
   const cell = (at: number) => {
     const text = cells[at]?.trim() ?? "";
     return BLANK.test(text) ? "" : text;
   };
-  const say = (at: number, reason: string) =>
-    void problems.push({ row: number, column: columns[at]?.name ?? "", value: (cells[at] ?? "").slice(0, 80), reason });
+  const told = (at: number, reason: string): Problem => ({
+    row: number,
+    column: columns[at]?.name ?? "",
+    value: (cells[at] ?? "").slice(0, 80),
+    reason,
+  });
+  const say = (at: number, reason: string) => void problems.push(told(at, reason));
+  const warn = (at: number, reason: string) => void warnings.push(told(at, reason));
   const where = (meaning: ColumnUse["meaning"]) => mapping.columns.findIndex((use) => use.meaning === meaning);
-  const reader = { cell, say, where, columns, mapping };
-  return {
+  const reader = { cell, say, warn, where, columns, mapping };
+  const planned = {
     row: number,
     name: readName(reader, number),
     identifiers: readIdentifiers(reader),
     position: readPosition(reader),
     measurements: QUANTITIES.flatMap((quantity) => readMeasurement(reader, quantity)),
     problems,
+    warnings,
   };
+  if (problems.length === 0 && !planned.position && planned.measurements.length === 0) {
+    const reason = "Neither a position nor a measurement stands in this row.";
+    problems.push({ row: number, column: "", value: cells.join(", ").slice(0, 80), reason });
+  }
+  return planned;
 }
 
 interface Reader {
   cell: (at: number) => string;
   say: (at: number, reason: string) => void;
+  warn: (at: number, reason: string) => void;
   where: (meaning: ColumnUse["meaning"]) => number;
   columns: TableColumn[];
   mapping: Mapping;
@@ -109,35 +125,32 @@ function readPosition({ cell, say, where }: Reader): PlannedRow["position"] {
 }
 
 function readMeasurement(reader: Reader, quantity: Quantity): PlannedMeasurement[] {
-  const { cell, say, where, columns, mapping } = reader;
-  const at = where(quantity);
-  if (at < 0 || cell(at) === "") return [];
-  const number = (place: number) => {
-    try {
-      return measuredNumberText(cell(place));
-    } catch (problem) {
-      say(place, problem instanceof Error ? problem.message : "Not a number.");
-      return null;
-    }
-  };
-  const value = number(at);
-  const errorAt = where(`${quantity}-error`);
-  const error = errorAt >= 0 && cell(errorAt) !== "" ? number(errorAt) : null;
-  if (error !== null && Number(error) <= 0) {
-    say(errorAt, "An error is above zero.");
+  const { cell, say, warn, where, columns, mapping } = reader;
+  const [at, errorAt] = [where(quantity), where(`${quantity}-error`)];
+  if (at < 0) return [];
+  const hasError = errorAt >= 0 && cell(errorAt) !== "";
+  if (cell(at) === "") {
+    if (hasError) say(errorAt, "There is an error, but no value that it belongs to.");
     return [];
   }
-  if (quantity === "parallax" && errorAt >= 0 && cell(errorAt) === "") {
-    say(errorAt, "The parallax has no error, so no range follows from it.");
-    return [];
+  const value = readNumber(reader, at);
+  const error = hasError ? readNumber(reader, errorAt) : null;
+  if (error !== null && Number(error) <= 0) say(errorAt, "An error is above zero.");
+  // Half of it would say more than the source does.
+  if (value === null || (hasError && (error === null || Number(error) <= 0))) return [];
+  if (quantity === "parallax" && error === null) {
+    warn(errorAt < 0 ? at : errorAt, "A parallax without an error is kept, but cannot be adopted: no range follows.");
   }
-  if (value === null) return [];
   const unit = mapping.columns[at]?.unit ?? "";
-  const errorUnit = errorAt >= 0 ? mapping.columns[errorAt]?.unit : unit;
-  if (errorUnit !== unit) {
-    say(errorAt, `The error is in ${errorUnit}, its value in ${unit}.`);
-    return [];
-  }
   const rawText = error === null ? cell(at) : `${cell(at)} ± ${cell(errorAt)}`;
   return [{ quantity, rawText: rawText.slice(0, 200), value, error, unit, column: columns[at]?.name ?? "" }];
+}
+
+function readNumber({ cell, say }: Reader, at: number): string | null {
+  try {
+    return measuredNumberText(cell(at));
+  } catch (problem) {
+    say(at, problem instanceof Error ? problem.message : "Not a number.");
+    return null;
+  }
 }

@@ -5,7 +5,7 @@ import { MOST_CELL, MOST_COLUMNS, MOST_ROWS, type Table, type TableColumn } from
 const DELIMITERS = [",", ";", "\t"];
 /** Units that tell a line of units under the head from a row, as archives print them. */
 const UNIT = /^"?(deg|[mu]?as|[mu]?as[./]yr(-1|\*\*-1)?|arcsec|mag|km[./]s(-1|\*\*-1)?|h:m:s|d:m:s)"?$/i;
-/** Rows of another width that are read before a file that has hardly any others is given up. */
+/** Rows of another width that are read before a file that has mostly such is given up. */
 const RAGGED = 200;
 
 function refuse(message: string): never {
@@ -57,7 +57,7 @@ function linesOf(text: string, delimiter: string): string[][] {
     read += 1;
     if (line.length !== width) ragged += 1;
     if (ragged > RAGGED && ragged * 2 > read) {
-      throw new Error(`hardly a row has the ${width} columns of the first line`);
+      throw new Error(`most rows do not have the ${width} columns of the first line`);
     }
     return line;
   };

@@ -7,6 +7,7 @@ import { authorise } from "#app/people/authorise.ts";
 import { readSourceChoices } from "../read-record.server.ts";
 import { openIntake } from "./open-intake.server.ts";
 import { type IntakePlan, planIntake } from "./plan-intake.server.ts";
+import type { Problem } from "./plan-row.ts";
 
 /** Every intake, newest first. */
 export async function readIntakes(actor: Actor | null) {
@@ -31,11 +32,11 @@ export async function readIntakes(actor: Actor | null) {
   }));
 }
 
-const PROBLEMS_A_PAGE = 100;
+const A_PAGE = 100;
 const SAMPLES = 3;
 
 /** One intake: its columns with samples, and, once they are placed, the dry run. @throws NotFound */
-export async function readIntake(actor: Actor | null, intakeId: string, problemsFrom = 0) {
+export async function readIntake(actor: Actor | null, intakeId: string, problemsFrom = 0, warningsFrom = 0) {
   authorise(actor, "intake.write");
   const { intake: found, mapping, table } = await openIntake(db(), intakeId);
   const placed = found.state === "uploaded" && mapping.options.sourceId !== null;
@@ -60,12 +61,12 @@ export async function readIntake(actor: Actor | null, intakeId: string, problems
       samples: table.rows.slice(0, SAMPLES).map((row) => row.cells[at] ?? ""),
     })),
     sources: await readSourceChoices(actor),
-    dryRun: plan ? summary(plan, problemsFrom) : null,
+    dryRun: plan ? summary(plan, problemsFrom, warningsFrom) : null,
   };
 }
 
-function summary(plan: IntakePlan, from: number) {
-  const negative = plan.created.filter((row) =>
+function summary(plan: IntakePlan, problemsFrom: number, warningsFrom: number) {
+  const negative = [...plan.created, ...plan.updated].filter((row) =>
     row.measurements.some((one) => one.quantity === "parallax" && Number(one.value) <= 0),
   );
   return {
@@ -74,9 +75,18 @@ function summary(plan: IntakePlan, from: number) {
     same: plan.same,
     bad: plan.badRows,
     notAboveZero: negative.length,
-    problemCount: plan.problems.length,
-    problems: plan.problems.slice(from, from + PROBLEMS_A_PAGE),
+    problems: page(plan.problems, problemsFrom),
+    warnings: page(plan.warnings, warningsFrom),
+  };
+}
+
+function page(all: Problem[], asked: number) {
+  const from = asked < all.length ? asked : 0;
+  return {
+    rows: all.slice(from, from + A_PAGE),
+    count: all.length,
     from,
-    nextFrom: from + PROBLEMS_A_PAGE < plan.problems.length ? from + PROBLEMS_A_PAGE : null,
+    previous: from > 0 ? Math.max(0, from - A_PAGE) : null,
+    next: from + A_PAGE < all.length ? from + A_PAGE : null,
   };
 }

@@ -1,11 +1,11 @@
-import { eq } from "drizzle-orm";
 import type { Actor } from "#app/audit/actor.ts";
 import { change } from "#app/audit/change.server.ts";
 import { compareAndSet } from "#app/database/compare-and-set.server.ts";
 import { db } from "#app/database/db.server.ts";
-import { intake, source } from "#app/database/schema/catalogue.ts";
-import { Invalid, Locked } from "#app/errors.ts";
+import { intake } from "#app/database/schema/catalogue.ts";
+import { Locked } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
+import { requireSource } from "../require-source.server.ts";
 import { mappingFromForm } from "./mapping.ts";
 import { openIntake } from "./open-intake.server.ts";
 
@@ -21,9 +21,8 @@ export async function saveMapping(
   const after = mappingFromForm(form, opened.table.columns);
   await change(actor, "intake.save-mapping", async (c) => {
     if (opened.intake.state !== "uploaded") throw new Locked("This table was dealt with already.");
-    const sourceId = after.options.sourceId ?? "";
-    const [known] = await c.tx.select({ id: source.id }).from(source).where(eq(source.id, sourceId));
-    if (!known) throw new Invalid({ sourceId: ["There is no such source."] });
+    const { sourceId } = after.options;
+    await requireSource(c, "sourceId", sourceId);
     if (JSON.stringify(opened.mapping) === JSON.stringify(after)) return c.unchanged();
     await compareAndSet(c.tx, intake, intakeId, version, { mapping: after, sourceId });
     c.audit({

@@ -31,6 +31,7 @@ export function MappingForm({
     sourceId: options.sourceId,
     locator: options.locator,
     epoch: options.epoch,
+    positionEpoch: options.positionEpoch,
     namePrefix: options.namePrefix,
     adoptReason: options.adoptReason,
     ...Object.fromEntries(
@@ -73,6 +74,12 @@ export function MappingForm({
           inputMode="decimal"
           required
           {...field("epoch")}
+        />
+        <Field
+          label="Positions at another epoch"
+          hint="Only where it differs: positions at 2000.0 beside parallaxes of 1991.25."
+          inputMode="decimal"
+          {...field("positionEpoch")}
         />
         <Field
           label="Call rows without a name"

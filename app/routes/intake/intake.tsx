@@ -7,19 +7,17 @@ import { Invalid } from "#app/errors.ts";
 import { plainNumber } from "#app/figures/office-numbers.ts";
 import { answered, answeredAction, readForm } from "#app/http.server.ts";
 import { requireActor } from "#app/people/require-actor.server.ts";
-import { Checkbox } from "#app/ui/Checkbox.tsx";
 import { DefinitionList } from "#app/ui/DefinitionList.tsx";
 import { FormErrors } from "#app/ui/FormErrors.tsx";
 import { LinkButton } from "#app/ui/LinkButton.tsx";
 import { Notice } from "#app/ui/Notice.tsx";
 import { PageHead } from "#app/ui/PageHead.tsx";
-import { Pager } from "#app/ui/Pager.tsx";
 import { StateMark } from "#app/ui/StateMark.tsx";
 import { SubmitButton } from "#app/ui/SubmitButton.tsx";
-import { Table } from "#app/ui/Table.tsx";
 import { readAgainAfterConflict } from "../after-conflict.ts";
 import { formState } from "../form-state.ts";
 import type { Route } from "./+types/intake";
+import { DryRun } from "./DryRun.tsx";
 import { MappingForm } from "./MappingForm.tsx";
 import { INTAKE_STATE } from "./words.ts";
 
@@ -29,8 +27,9 @@ export const meta: Route.MetaFunction = ({ loaderData }) => [
 
 export const loader = answered(async ({ context, params, request }: Route.LoaderArgs) => {
   const query = new URL(request.url).searchParams;
-  const from = Math.max(0, Number(query.get("problems") ?? 0) || 0);
-  return { ...(await readIntake(requireActor(context), params.intake, from)), said: query.get("said") };
+  const from = (name: string) => Math.max(0, Math.trunc(Number(query.get(name))) || 0);
+  const page = await readIntake(requireActor(context), params.intake, from("problems"), from("warnings"));
+  return { ...page, said: query.get("said") };
 });
 
 export const shouldRevalidate = readAgainAfterConflict;
@@ -120,71 +119,5 @@ function Became({ intake }: Pick<Data, "intake">) {
         </Link>
       </div>
     </>
-  );
-}
-
-function DryRun({ intake, dryRun }: { intake: Data["intake"]; dryRun: NonNullable<Data["dryRun"]> }) {
-  const count = (value: number) => plainNumber(value, "en");
-  const nothingNew = dryRun.created === 0 && dryRun.updated === 0;
-  return (
-    <section id="dry-run" className="mt-14">
-      <h2 className="mb-4 text-xl">What would happen</h2>
-      <DefinitionList
-        ledger
-        className="max-w-words"
-        items={[
-          { term: "New records", value: count(dryRun.created) },
-          { term: "Records that get new measurements", value: count(dryRun.updated) },
-          { term: "Rows of which everything is kept already", value: count(dryRun.same) },
-          { term: "Bad rows", value: count(dryRun.bad) },
-          ...(dryRun.notAboveZero > 0
-            ? [
-                {
-                  term: "Among the new ones, parallaxes that are not above zero",
-                  value: count(dryRun.notAboveZero),
-                  note: "They are real measurements and are kept; nothing is inverted from them.",
-                },
-              ]
-            : []),
-        ]}
-      />
-      {dryRun.bad > 0 ? <Problems dryRun={dryRun} /> : null}
-      {nothingNew ? (
-        <p className="mt-6">There is nothing in it that is not in the catalogue already.</p>
-      ) : (
-        <Form method="post" className="mt-8 grid gap-4">
-          <input type="hidden" name="version" value={intake.version} />
-          {dryRun.bad > 0 ? (
-            <Checkbox name="goodRowsOnly" label="Take the good rows and leave the bad ones out" />
-          ) : null}
-          <SubmitButton intent="apply" pending="Writing…" className="justify-self-start">
-            Take it into the catalogue
-          </SubmitButton>
-        </Form>
-      )}
-    </section>
-  );
-}
-
-function Problems({ dryRun }: { dryRun: NonNullable<Data["dryRun"]> }) {
-  return (
-    <div className="mt-8">
-      <Table
-        caption="Bad rows"
-        rows={dryRun.problems}
-        rowKey={(row) => `${row.row} ${row.column} ${row.reason}`}
-        columns={[
-          { id: "row", head: "Row", numeric: true, rowHead: true, className: "w-16", cell: (row) => row.row },
-          { id: "column", head: "Column", cell: (row) => row.column || "the whole row" },
-          { id: "value", head: "Value", cell: (row) => <code className="break-all">{row.value || "empty"}</code> },
-          { id: "reason", head: "Why", cell: (row) => row.reason },
-        ]}
-      />
-      <Pager
-        summary={`${plainNumber(dryRun.from + 1, "en")} to ${plainNumber(dryRun.from + dryRun.problems.length, "en")} of ${plainNumber(dryRun.problemCount, "en")}`}
-        previous={dryRun.from > 0 ? `?problems=${Math.max(0, dryRun.from - 100)}#dry-run` : null}
-        next={dryRun.nextFrom ? `?problems=${dryRun.nextFrom}#dry-run` : null}
-      />
-    </div>
   );
 }

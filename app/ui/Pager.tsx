@@ -1,6 +1,8 @@
 import { Link } from "react-router";
 
 interface PagerProps {
+  /** Where a page has several of them: what this one turns the pages of. */
+  label?: string;
   /** "51 to 100 of 1,204", already in words. */
   summary: string;
   /** Addresses of the neighbours; none at an end. */
@@ -8,9 +10,9 @@ interface PagerProps {
   next?: string | null;
 }
 
-export function Pager({ summary, previous, next }: PagerProps) {
+export function Pager({ label = "Pages", summary, previous, next }: PagerProps) {
   return (
-    <nav aria-label="Pages" className="mt-4 flex flex-wrap items-center gap-x-6 gap-y-1 text-sm">
+    <nav aria-label={label} className="mt-4 flex flex-wrap items-center gap-x-6 gap-y-1 text-sm">
       <span className="num text-ink-soft">{summary}</span>
       <PagerLink to={previous} rel="prev">
         Previous

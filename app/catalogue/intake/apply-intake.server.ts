@@ -13,7 +13,7 @@ import { runAgain } from "../record-names.server.ts";
 import type { IntakeOptions, Mapping } from "./mapping.ts";
 import type { Match } from "./match-records.server.ts";
 import { openIntake } from "./open-intake.server.ts";
-import { planIntake } from "./plan-intake.server.ts";
+import { inTurns, planIntake } from "./plan-intake.server.ts";
 import type { PlannedMeasurement, PlannedRow } from "./plan-row.ts";
 
 const BATCH = 500;
@@ -52,8 +52,8 @@ export async function applyIntake(
       throw new Locked(`${rows} Nothing was written. Mend the file, or take the good rows only.`);
     }
     const writing: Writing = { records: [], identifiers: [], measurements: [] };
-    for (const row of plan.created) planRecord(c, writing, row, mapping, input.intakeId);
-    for (const row of plan.updated) planAddition(c, writing, row, mapping.options, input.intakeId);
+    for await (const row of inTurns(plan.created)) planRecord(c, writing, row, mapping, input.intakeId);
+    for await (const row of inTurns(plan.updated)) planAddition(c, writing, row, mapping.options, input.intakeId);
     await write(c, writing);
     const counts = { created: plan.created.length, updated: plan.updated.length, same: plan.same, bad: plan.badRows };
     await compareAndSet(c.tx, intake, input.intakeId, input.version, {

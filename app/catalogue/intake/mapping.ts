@@ -58,7 +58,9 @@ function useFromForm(form: FormData, column: TableColumn, at: number, fields: Fi
   const unit = knownUnit(quantity, said);
   if (!unit) {
     const { label, units } = QUANTITY_FACTS[quantity];
-    fields[`unit-${at}`] = [`“${said}” is no unit of ${label.toLowerCase()}: ${Object.keys(units).join(", ")}.`];
+    fields[`unit-${at}`] = [
+      `“${said}” is no unit of ${label.charAt(0).toLowerCase()}${label.slice(1)}: ${Object.keys(units).join(", ")}.`,
+    ];
   }
   return { meaning, unit, catalogue };
 }

@@ -4,7 +4,7 @@ import { db } from "#app/database/db.server.ts";
 import { newId } from "#app/database/new-id.ts";
 import { auditEntry } from "#app/database/schema/audit.ts";
 import { intake, measurement, record, recordIdentifier } from "#app/database/schema/catalogue.ts";
-import { Invalid, Locked } from "#app/errors.ts";
+import { Conflict, Invalid, Locked } from "#app/errors.ts";
 import { makeRecord, makeSource } from "#tests/factories/catalogue.ts";
 import { apply, dryRun, map, named, upload } from "#tests/factories/intake.ts";
 import { makeActor } from "#tests/factories/person.ts";
@@ -215,4 +215,41 @@ test("bad rows are told a hundred a page, and an address beyond the last page sh
   expect(last).toMatchObject({ from: 200, previous: 100, next: null });
   expect(last?.rows.at(-1)).toMatchObject({ row: 250, value: "nonsense" });
   expect(await page(9000)).toMatchObject({ from: 0 });
+});
+
+test("an application that fails at its last step leaves nothing of it behind", async () => {
+  const editor = await makeActor("editor");
+  const name = named();
+  const { intakeId } = await upload(editor, `${HEAD}\n${name},10,10,5,0.1\n`);
+  await map(editor, intakeId);
+  // The version is compared when everything else has been written.
+  await expect(applyIntake(editor, { intakeId, version: 1, goodRowsOnly: false })).rejects.toBeInstanceOf(Conflict);
+  expect(await db().select().from(record).where(eq(record.name, name))).toEqual([]);
+  expect(await db().select().from(measurement).where(eq(measurement.intakeId, intakeId))).toEqual([]);
+  expect((await readIntake(editor, intakeId)).intake).toMatchObject({ state: "uploaded", createdCount: 0 });
+  expect(await apply(editor, intakeId)).toMatchObject({ created: 1 });
+});
+
+test("a VOTable goes in by its UCDs and units; nulls of its own are no values", async () => {
+  const editor = await makeActor("editor");
+  const name = named();
+  const number = hip();
+  const field = (as: string, more: string, inner = "") => `<FIELD name="${as}" ${more}>${inner}</FIELD>`;
+  const fields = [
+    field("HIP", 'datatype="int"'),
+    field("alpha", 'datatype="double" unit="deg" ucd="pos.eq.ra;meta.main"'),
+    field("delta", 'datatype="double" unit="deg" ucd="pos.eq.dec;meta.main"'),
+    field("p", 'datatype="double" unit="arcsec" ucd="pos.parallax.trig"', '<VALUES null="-99"/>'),
+    field("ep", 'datatype="double" unit="arcsec" ucd="stat.error;pos.parallax.trig"'),
+  ];
+  const row = (...cells: (string | number)[]) => `<TR>${cells.map((cell) => `<TD>${cell}</TD>`).join("")}</TR>`;
+  const rows = row(number, 10, 10, "0.0500", "0.0002") + row(number + 1, 11, 11, -99, "");
+  const table = `<TABLE>${fields.join("")}<DATA><TABLEDATA>${rows}</TABLEDATA></DATA></TABLE>`;
+  const { intakeId } = await upload(editor, `<VOTABLE version="1.4"><RESOURCE>${table}</RESOURCE></VOTABLE>`);
+  await map(editor, intakeId, { namePrefix: name });
+  expect(await apply(editor, intakeId)).toEqual({ created: 2, updated: 0, same: 0, bad: 0 });
+  const entered = await db().select().from(measurement).where(eq(measurement.intakeId, intakeId));
+  expect(entered).toMatchObject([
+    { rawText: "0.0500 ± 0.0002", unit: "arcsec", valueCanonical: 50, errorCanonical: 0.2 },
+  ]);
 });

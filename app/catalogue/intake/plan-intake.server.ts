@@ -1,3 +1,4 @@
+import { setImmediate } from "node:timers/promises";
 import { and, eq, inArray } from "drizzle-orm";
 import type { Reader } from "#app/database/db.server.ts";
 import { measurement } from "#app/database/schema/catalogue.ts";
@@ -22,18 +23,29 @@ export interface IntakePlan {
 
 /** What would become of a table. Nothing is written; applying works from the same plan. */
 export async function planIntake(reader: Reader, table: Table, mapping: Mapping): Promise<IntakePlan> {
-  const rows = table.rows.map((row) => planRow(row, table.columns, mapping));
+  const rows: PlannedRow[] = [];
+  for await (const row of inTurns(table.rows)) rows.push(planRow(row, table.columns, mapping));
   const columns = namingColumns(table, mapping);
   refuseRepeated(rows, columns);
   const known = await matchRecords(reader, rows.filter(isGood), columns);
   const recordIds = [...known.values()].map((one) => one.recordId);
   const kept = await findMeasurements(reader, recordIds, mapping.options.sourceId ?? "");
   const plan: IntakePlan = { created: [], updated: [], same: 0, badRows: 0, problems: [], warnings: [] };
-  for (const row of rows.filter(isGood)) place(plan, row, known.get(row.row), kept, columns);
+  for await (const row of inTurns(rows.filter(isGood))) place(plan, row, known.get(row.row), kept, columns);
   const bad = rows.filter((row) => !isGood(row));
   plan.badRows = bad.length;
   plan.problems = bad.flatMap((row) => row.problems);
   return plan;
+}
+
+const TURN = 500;
+
+/** Goes through many rows and lets others be answered in between. */
+export async function* inTurns<T>(rows: readonly T[]): AsyncGenerator<T> {
+  for (let from = 0; from < rows.length; from += TURN) {
+    yield* rows.slice(from, from + TURN);
+    await setImmediate();
+  }
 }
 
 const isGood = (row: PlannedRow) => row.problems.length === 0;

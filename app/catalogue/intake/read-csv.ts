@@ -43,7 +43,7 @@ export function readCsv(text: string): Table {
   const rulers = (line: string[]) => line.every((cell) => /^-+$/.test(cell));
   const data = rest.slice(hasUnits ? 1 : 0).filter((line) => !rulers(line));
   if (data.length === 0) refuse("There is a head, but no row under it.");
-  if (data.length > MOST_ROWS) refuse(`More than ${MOST_ROWS} rows. Part the file first.`);
+  if (data.length > MOST_ROWS) refuse(`More than ${MOST_ROWS} rows. Part the file and send it piece by piece.`);
   const columns = names.map(
     (name, at): TableColumn => ({ name, unit: units?.[at]?.replace(/"/g, "") || null, ucd: null }),
   );

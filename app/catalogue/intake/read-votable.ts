@@ -78,7 +78,8 @@ class TableReader {
     if (tag === "TR" && this.cells) {
       this.rows.push({ number: this.rows.length + 1, cells: this.cells });
       this.cells = null;
-      if (this.rows.length > MOST_ROWS) refuse(`More than ${MOST_ROWS} rows. Part the file first.`);
+      if (this.rows.length > MOST_ROWS)
+        refuse(`More than ${MOST_ROWS} rows. Part the file and send it piece by piece.`);
     }
   }
 

@@ -28,7 +28,7 @@ export function DryRun({ intake, dryRun }: { intake: Page["intake"]; dryRun: Non
           ...(dryRun.notAboveZero > 0
             ? [
                 {
-                  term: "Among the new ones, parallaxes that are not above zero",
+                  term: "Parallaxes not above zero",
                   value: count(dryRun.notAboveZero),
                   note: "They are real measurements and are kept; nothing is inverted from them.",
                 },
@@ -37,7 +37,7 @@ export function DryRun({ intake, dryRun }: { intake: Page["intake"]; dryRun: Non
         ]}
       />
       <Problems caption="Bad rows" name="problems" page={dryRun.problems} />
-      <Problems caption="Taken all the same, but look at them" name="warnings" page={dryRun.warnings} />
+      <Problems caption="Rows to look at, taken all the same" name="warnings" page={dryRun.warnings} />
       {nothingNew ? (
         <p className="mt-6">There is nothing in it that is not in the catalogue already.</p>
       ) : (
@@ -72,11 +72,14 @@ function Problems({ caption, name, page }: { caption: string; name: string; page
           { id: "reason", head: "Why", cell: (row) => row.reason },
         ]}
       />
-      <Pager
-        summary={`${count(page.from + 1)} to ${count(page.from + page.rows.length)} of ${count(page.count)}`}
-        previous={to(page.previous)}
-        next={to(page.next)}
-      />
+      {page.previous === null && page.next === null ? null : (
+        <Pager
+          label={`Pages of ${caption.toLowerCase()}`}
+          summary={`${count(page.from + 1)} to ${count(page.from + page.rows.length)} of ${count(page.count)}`}
+          previous={to(page.previous)}
+          next={to(page.next)}
+        />
+      )}
     </div>
   );
 }

@@ -15,7 +15,9 @@ function words(meaning: Meaning): string {
   const quantity = quantityOf(meaning);
   if (!quantity) return PLAIN[meaning] ?? meaning;
   const { label } = QUANTITY_FACTS[quantity];
-  return meaning.endsWith("-error") ? `error of ${label.toLowerCase()}` : label.toLowerCase();
+  // "Magnitude V" is "magnitude V", not "magnitude v".
+  const inSentence = label.charAt(0).toLowerCase() + label.slice(1);
+  return meaning.endsWith("-error") ? `error of ${inSentence}` : inSentence;
 }
 
 export const MEANING_OPTIONS = MEANINGS.map((meaning) => ({ value: meaning, label: words(meaning) }));

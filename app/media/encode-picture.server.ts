@@ -13,6 +13,8 @@ const TAKEN: Record<string, string> = {
 };
 const MOST_PIXELS = 50_000_000;
 const LEAST_WIDTH = 320;
+/** WebP ends at 16383 pixels (RFC 9649, section 3.4: 14 bits a side, from memory); six times the largest width stays below. */
+const TALLEST = 6;
 const WIDTHS = [480, 960, 1600, 2400];
 
 export interface PictureFacts {
@@ -51,13 +53,17 @@ export async function inspectPicture(bytes: Uint8Array): Promise<PictureFacts> {
       ),
     );
   const mime = TAKEN[facts.format ?? ""];
-  if (!mime) return refuse("This kind of file is not taken: JPEG, PNG, WebP, AVIF or TIFF.");
+  // HEIC of a telephone comes in the same wrapping as AVIF, with a code inside that cannot be read here.
+  const foreign = facts.format === "heif" && facts.compression !== "av1";
+  if (!mime || foreign) return refuse("This kind of file is not taken: JPEG, PNG, WebP, AVIF or TIFF.");
   if ((facts.pages ?? 1) > 1) return refuse("This file has several pages or moves. Send one picture.");
   const { width, height } = facts.autoOrient;
   if (width * height > MOST_PIXELS)
     return refuse("This picture has more than 50 million pixels. Make it smaller first.");
   if (width < LEAST_WIDTH)
     return refuse(`This picture is only ${width} pixels wide; at least ${LEAST_WIDTH} are needed.`);
+  if (height > width * TALLEST)
+    return refuse(`This picture is more than ${TALLEST} times as tall as wide. Crop it first.`);
   return { mime, width, height };
 }
 

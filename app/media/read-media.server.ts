@@ -3,6 +3,7 @@ import type { Actor } from "#app/audit/actor.ts";
 import { db } from "#app/database/db.server.ts";
 import { VARIANT_FORMATS, type VariantFormat } from "#app/database/enums.ts";
 import { media, mediaVariant } from "#app/database/schema/media.ts";
+import { person } from "#app/database/schema/people.ts";
 import { NotFound } from "#app/errors.ts";
 import { authorise } from "#app/people/authorise.ts";
 import { getObject } from "./object-store.server.ts";
@@ -56,10 +57,15 @@ export async function readMediaList(actor: Actor | null) {
 /** @throws NotFound */
 export async function readMedia(actor: Actor | null, mediaId: string) {
   authorise(actor, "media.read");
-  const [row] = await db().select().from(media).where(eq(media.id, mediaId));
-  if (!row) throw new NotFound("There is no such picture.");
+  const [found] = await db()
+    .select({ row: media, keptBy: person.name })
+    .from(media)
+    .innerJoin(person, eq(person.id, media.createdBy))
+    .where(eq(media.id, mediaId));
+  if (!found) throw new NotFound("There is no such picture.");
+  const { row, keptBy } = found;
   const sources = await readPictureSources([row.digest]);
-  return { ...row, createdAt: row.createdAt.toISOString(), sources: sources[row.digest] ?? [] };
+  return { ...row, keptBy, createdAt: row.createdAt.toISOString(), sources: sources[row.digest] ?? [] };
 }
 
 /** The bytes of a variant. @throws NotFound */

@@ -3,6 +3,7 @@ import { Link, type ShouldRevalidateFunctionArgs, useRevalidator, useSearchParam
 import { sceneMembers } from "#app/exhibits/scene-members.ts";
 import { answered } from "#app/http.server.ts";
 import { readKioskPage } from "#app/kiosks/read-kiosk-page.server.ts";
+import { creditText } from "#app/media/licence-words.ts";
 import { claimsSentence } from "#app/scene/claims.ts";
 import { PlaceTable } from "#app/stage/PlaceTable.tsx";
 import { VolumeStage } from "#app/stage/VolumeStage.tsx";
@@ -174,7 +175,7 @@ function Shown({ edition, language, resets, startAgain, onTurn }: ShownProps) {
                 width={scene.picture.width}
                 height={scene.picture.height}
                 sizes="40vw"
-                credit={`${scene.picture.creditLine} (${scene.picture.licence})`}
+                credit={creditText(scene.picture, language)}
                 className="mt-4 max-w-xl"
               />
             ) : null}

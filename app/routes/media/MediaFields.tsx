@@ -1,17 +1,9 @@
-import { LICENCES, type Licence } from "#app/database/enums.ts";
+import { LICENCES } from "#app/database/enums.ts";
+import { LICENCE_WORDS } from "#app/media/licence-words.ts";
 import { Field } from "#app/ui/Field.tsx";
 import { Select } from "#app/ui/Select.tsx";
 import { TextArea } from "#app/ui/TextArea.tsx";
 import type { formState } from "../form-state.ts";
-
-export const LICENCE_WORDS: Record<Licence, string> = {
-  "CC0-1.0": "CC0 1.0, no rights reserved",
-  "CC-BY-4.0": "CC BY 4.0",
-  "CC-BY-SA-4.0": "CC BY-SA 4.0",
-  "public-domain": "public domain",
-  "own-work": "our own work",
-  "by-written-permission": "by written permission",
-};
 
 /** What a picture cannot be shown without. */
 export function MediaFields({ form }: { form: ReturnType<typeof formState> }) {
@@ -23,7 +15,7 @@ export function MediaFields({ form }: { form: ReturnType<typeof formState> }) {
       <Select
         label="Licence"
         placeholder="Choose a licence"
-        options={LICENCES.map((one) => ({ value: one, label: LICENCE_WORDS[one] }))}
+        options={LICENCES.map((one) => ({ value: one, label: LICENCE_WORDS.en[one] }))}
         required
         {...field("licence")}
       />

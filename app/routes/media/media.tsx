@@ -1,5 +1,7 @@
 import { Link } from "react-router";
+import { countMediaUses } from "#app/exhibits/read-media-uses.server.ts";
 import { answered } from "#app/http.server.ts";
+import { creditText } from "#app/media/licence-words.ts";
 import { readMediaList } from "#app/media/read-media.server.ts";
 import { mayDo } from "#app/people/permissions.ts";
 import { requireActor } from "#app/people/require-actor.server.ts";
@@ -13,10 +15,11 @@ export const meta: Route.MetaFunction = () => [{ title: "Media · Alidade" }];
 
 export const loader = answered(async ({ context }: Route.LoaderArgs) => {
   const actor = requireActor(context);
-  return { media: await readMediaList(actor), mayWrite: mayDo(actor.roles, "media.write") };
+  const [media, uses] = await Promise.all([readMediaList(actor), countMediaUses(actor)]);
+  return { media, uses, mayWrite: mayDo(actor.roles, "media.write") };
 });
 
-export default function Media({ loaderData: { media, mayWrite } }: Route.ComponentProps) {
+export default function Media({ loaderData: { media, uses, mayWrite } }: Route.ComponentProps) {
   const add = mayWrite ? (
     <LinkButton look="primary" to="/media/new">
       New picture
@@ -24,9 +27,9 @@ export default function Media({ loaderData: { media, mayWrite } }: Route.Compone
   ) : null;
   return (
     <>
-      <PageHead title="Media" subtitle="pictures, each with its credit" actions={add} />
+      <PageHead title="Media" subtitle="pictures, each with its credit" actions={media.length > 0 ? add : null} />
       {media.length === 0 ? (
-        <EmptyState title="No picture yet">
+        <EmptyState title="No picture yet" actions={add}>
           A picture is taken with its creator, credit line, licence and alternative text.
         </EmptyState>
       ) : null}
@@ -39,14 +42,20 @@ export default function Media({ loaderData: { media, mayWrite } }: Route.Compone
               width={one.width}
               height={one.height}
               sizes="(min-width: 80rem) 28vw, (min-width: 40rem) 45vw, 100vw"
-              credit={`${one.creditLine} (${one.licence})`}
+              credit={creditText(one, "en")}
             />
             <Link to={`/media/${one.id}`} className="link">
               {one.fileName}
             </Link>
+            <span className="num text-sm text-ink-soft"> · {shownIn(uses[one.id] ?? 0)}</span>
           </li>
         ))}
       </ul>
     </>
   );
+}
+
+function shownIn(scenes: number): string {
+  if (scenes === 0) return "shown nowhere yet";
+  return scenes === 1 ? "shown in 1 scene" : `shown in ${scenes} scenes`;
 }

@@ -1,5 +1,6 @@
 import { Form, Link, redirect } from "react-router";
-import { answered, answeredAction } from "#app/http.server.ts";
+import { type FieldErrors, Invalid } from "#app/errors.ts";
+import { answered, answeredAction, readForm } from "#app/http.server.ts";
 import { UploadMedia } from "#app/media/media-input.ts";
 import { uploadMedia } from "#app/media/upload-media.server.ts";
 import { parseInput } from "#app/parse-input.ts";
@@ -26,10 +27,30 @@ export const loader = answered(({ context }: Route.LoaderArgs) => {
 export const action = answeredAction(async ({ request, context }: Route.ActionArgs) => {
   const actor = requireActor(context);
   authorise(actor, "media.write");
-  const { form, upload } = await readUpload(request, "file", MOST_BYTES);
+  const { form, upload } = await readPicture(request);
   const { mediaId, alreadyKept } = await uploadMedia(actor, parseInput(UploadMedia, form), upload);
   return redirect(`/media/${mediaId}?said=${alreadyKept ? "already" : "kept"}`);
 });
+
+/** A missing file must not hide what else is missing: everything is said at once. */
+async function readPicture(request: Request) {
+  try {
+    return await readUpload(request, "file", MOST_BYTES);
+  } catch (error) {
+    if (error instanceof Invalid) throw new Invalid({ ...missingWords(await readForm(request)), ...error.fields });
+    throw error;
+  }
+}
+
+function missingWords(form: FormData): FieldErrors {
+  try {
+    parseInput(UploadMedia, form);
+    return {};
+  } catch (error) {
+    if (error instanceof Invalid) return error.fields;
+    throw error;
+  }
+}
 
 export default function NewMedia({ actionData }: Route.ComponentProps) {
   const form = formState(actionData);

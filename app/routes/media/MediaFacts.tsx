@@ -30,7 +30,11 @@ export function MediaFacts({ medium }: { medium: Kept }) {
         { term: "Read to those who do not see it", value: medium.altEn },
         {
           term: "The same in French",
-          value: medium.altFr ? <span lang="fr">{medium.altFr}</span> : "none; French pages say the English",
+          value: medium.altFr ? (
+            <span lang="fr">{medium.altFr}</span>
+          ) : (
+            "none; an exhibit that is also in French needs one"
+          ),
         },
         { term: "As it arrived", value: `${KIND[medium.mime] ?? medium.mime}, ${size}, ${kilobytes}` },
         {

@@ -26,7 +26,13 @@ export function MediaFields({ form }: { form: ReturnType<typeof formState> }) {
         required
         {...field("altEn")}
       />
-      <TextArea label="Alternative text in French" lang="fr" rows={2} {...field("altFr")} />
+      <TextArea
+        label="Alternative text in French"
+        hint="An exhibit that is also in French cannot be submitted without it."
+        lang="fr"
+        rows={2}
+        {...field("altFr")}
+      />
     </>
   );
 }

@@ -53,7 +53,7 @@ export default function Medium({ loaderData, actionData }: Route.ComponentProps)
   return (
     <>
       <PageHead title={medium.fileName} crumbs={[{ label: "Media", to: "/media" }]} />
-      {said && SAID[said] && !actionData ? <Notice tone="success">{SAID[said]}</Notice> : null}
+      {said && Object.hasOwn(SAID, said) && !actionData ? <Notice tone="success">{SAID[said]}</Notice> : null}
       <div className="grid gap-14 lg:grid-cols-[3fr_2fr]">
         <div className="grid min-w-0 content-start gap-10">
           <Picture

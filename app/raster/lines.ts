@@ -1,5 +1,6 @@
 import { cover, type Mask } from "./mask.ts";
 import { type Projector, toPixels, toView } from "./project.ts";
+import { areaBefore, areaInBands } from "./square-area.ts";
 
 const a = new Float64Array(3);
 const b = new Float64Array(3);
@@ -53,14 +54,8 @@ function clipped(x: number, y: number, dx: number, dy: number, margin: number, w
   return enter < leave ? { enter, leave } : null;
 }
 
-/** Overlap of the pixel-wide interval around `middle` with the interval from `low` to `high`. */
-function overlap(middle: number, low: number, high: number): number {
-  return Math.max(0, Math.min(middle + 0.5, high) - Math.max(middle - 0.5, low));
-}
-
 /**
- * Covers a straight line with square ends, in pixels. A pixel is covered by the product of its overlap across and along
- * the line, which is exact for upright and level lines and keeps the area of the others.
+ * Covers a straight line with square ends, in pixels: each pixel by exactly the share of it that lies on the line.
  */
 export function coverLine(mask: Mask, x0: number, y0: number, x1: number, y1: number, widthPx: number): void {
   const margin = widthPx + 2;
@@ -74,27 +69,61 @@ export function coverLine(mask: Mask, x0: number, y0: number, x1: number, y1: nu
   if (!(length > 0)) return;
   const ux = (endX - startX) / length;
   const uy = (endY - startY) / length;
-  const level = Math.abs(ux) >= Math.abs(uy);
-  const half = widthPx / 2;
-  const reach = (half + 0.71) / Math.max(Math.abs(ux), Math.abs(uy)) + 1;
-  const [from, to] = level ? [startX, endX] : [startY, endY];
-  const limit = level ? mask.width : mask.height;
-  const acrossLimit = level ? mask.height : mask.width;
-  const first = Math.max(0, Math.floor(Math.min(from, to) - half - 1));
-  const last = Math.min(limit - 1, Math.ceil(Math.max(from, to) + half + 1));
-  for (let along = first; along <= last; along++) {
-    const slope = level ? uy / ux : ux / uy;
-    const origin = level ? startY - startX * slope : startX - startY * slope;
-    const centre = origin + (along + 0.5) * slope;
-    const low = Math.max(0, Math.floor(centre - reach));
-    const high = Math.min(acrossLimit - 1, Math.ceil(centre + reach));
-    for (let across = low; across <= high; across++) {
-      const px = level ? along : across;
-      const py = level ? across : along;
-      const dx = px + 0.5 - startX;
-      const dy = py + 0.5 - startY;
-      const amount = overlap(dy * ux - dx * uy, -half, half) * overlap(dx * ux + dy * uy, 0, length);
-      if (amount > 0) cover(mask, px, py, amount);
-    }
+  const line: StraightLine = { startX, startY, ux, uy, length, half: widthPx / 2 };
+  if (Math.abs(ux) >= Math.abs(uy)) coverColumns(mask, line);
+  else coverRows(mask, line);
+}
+
+interface StraightLine {
+  startX: number;
+  startY: number;
+  /** Direction, a unit vector. */
+  ux: number;
+  uy: number;
+  length: number;
+  half: number;
+}
+
+function coverColumns(mask: Mask, line: StraightLine): void {
+  const { startX, startY, ux, uy, length, half } = line;
+  const reach = (half + 0.71) / Math.abs(ux) + 1;
+  const endX = startX + ux * length;
+  const last = Math.min(mask.width - 1, Math.ceil(Math.max(startX, endX) + half + 1));
+  for (let x = Math.max(0, Math.floor(Math.min(startX, endX) - half - 1)); x <= last; x++) {
+    const centre = startY + ((x + 0.5 - startX) * uy) / ux;
+    const bottom = Math.min(mask.height - 1, Math.ceil(centre + reach));
+    for (let y = Math.max(0, Math.floor(centre - reach)); y <= bottom; y++) coverPixel(mask, line, x, y);
   }
+}
+
+function coverRows(mask: Mask, line: StraightLine): void {
+  const { startX, startY, ux, uy, length, half } = line;
+  const reach = (half + 0.71) / Math.abs(uy) + 1;
+  const endY = startY + uy * length;
+  const last = Math.min(mask.height - 1, Math.ceil(Math.max(startY, endY) + half + 1));
+  for (let y = Math.max(0, Math.floor(Math.min(startY, endY) - half - 1)); y <= last; y++) {
+    const centre = startX + ((y + 0.5 - startY) * ux) / uy;
+    const right = Math.min(mask.width - 1, Math.ceil(centre + reach));
+    for (let x = Math.max(0, Math.floor(centre - reach)); x <= right; x++) coverPixel(mask, line, x, y);
+  }
+}
+
+/** Half a pixel's diagonal: nothing of a pixel is farther from its centre. */
+const HALF_DIAGONAL = Math.SQRT1_2;
+
+function coverPixel(mask: Mask, { startX, startY, ux, uy, length, half }: StraightLine, x: number, y: number): void {
+  const dx = x + 0.5 - startX;
+  const dy = y + 0.5 - startY;
+  const along = dx * ux + dy * uy;
+  const across = dy * ux - dx * uy;
+  if (Math.abs(across) >= half + HALF_DIAGONAL) return;
+  if (along <= -HALF_DIAGONAL || along >= length + HALF_DIAGONAL) return;
+  const inside = along >= HALF_DIAGONAL && along <= length - HALF_DIAGONAL;
+  const amount = inside
+    ? areaBefore(-uy, ux, half - across) - areaBefore(-uy, ux, -half - across)
+    : areaInBands(
+        { nx: -uy, ny: ux, low: -half - across, high: half - across },
+        { nx: ux, ny: uy, low: -along, high: length - along },
+      );
+  if (amount > 0) cover(mask, x, y, amount);
 }
